@@ -1,0 +1,155 @@
+/**
+ * The assessment document (`skewback.assessment`, version 1): the open interface that the command line prints, the
+ * findings read and the sheets draw from.
+ *
+ * Units: m, kN, kN·m, kN/m³; forces for the whole breadth. Axes: x right, y up, origin midway between the intrados
+ * springings. Thrust is positive in compression. No field is ever NaN or infinite: what cannot be computed is null
+ * and a check says why. Fields marked optional belong to questions that were not asked of this scheme.
+ */
+export interface Point {
+  readonly x: number;
+  readonly y: number;
+}
+
+/** A default that was used because the job gives no value. */
+export interface Assumed {
+  readonly field: string;
+  readonly value: number | string | null;
+  readonly because: string;
+}
+
+export interface Joint {
+  readonly intrados: Point;
+  readonly extrados: Point;
+}
+
+/** One force on one block, acting at (x, y). */
+export interface BlockForce {
+  readonly x: number;
+  readonly y: number;
+  readonly fx: number;
+  readonly fy: number;
+  /** `self-weight`, `above`, `sway`, or the id of the load it comes from. */
+  readonly from: string;
+}
+
+export interface Block {
+  readonly forces: readonly BlockForce[];
+}
+
+export type Side = 'intrados' | 'extrados';
+
+/** The line of thrust touches this face at this joint; the joint opens at the other face. */
+export interface Hinge {
+  readonly joint: number;
+  readonly side: Side;
+}
+
+/** Where the resultant crosses each joint, joint 0 first; null coordinates where it runs parallel to the joint. */
+export type LinePoint = { readonly x: number; readonly y: number } | { readonly x: null; readonly y: null };
+
+export interface ThrustState {
+  /** Horizontal component at the left springing, kN. Null where no finite value exists. */
+  readonly horizontal: number | null;
+  readonly line: readonly LinePoint[];
+  readonly hinges: readonly Hinge[];
+}
+
+export interface Reaction {
+  /** Horizontal thrust on the support, positive in compression, kN. */
+  readonly horizontal: number;
+  /** Vertical load on the support, positive downwards, kN. */
+  readonly vertical: number;
+  /** Where it crosses the springing joint, m; null where it runs parallel to that joint. */
+  readonly x: number | null;
+  readonly y: number | null;
+}
+
+export interface CrownBalance {
+  readonly horizontal: number;
+  readonly leftVertical: number;
+  readonly rightVertical: number;
+  /** Height of mid-ring at the crown over mid-ring at the springings, m. */
+  readonly lever: number;
+  /** Whether the line through mid-ring at crown and springings stays within the ring. */
+  readonly inside: boolean;
+}
+
+export interface Thrust {
+  readonly stands: boolean;
+  /** Null when no line fits. */
+  readonly least: ThrustState | null;
+  readonly greatest: ThrustState | null;
+  /** Least and greatest horizontal when joints may also slide and crush; null when no line obeys those too. */
+  readonly usable?: { readonly least: number | null; readonly greatest: number | null } | null;
+}
+
+export type Status = 'holds' | 'narrow' | 'fails' | 'unknown';
+
+export interface Check {
+  readonly id: string;
+  readonly title: string;
+  readonly status: Status;
+  readonly demand: number | null;
+  readonly limit: number | null;
+  /** demand / limit. */
+  readonly utilisation: number | null;
+  readonly unit: string;
+  /** Such as `joint 4`, or empty. */
+  readonly where: string;
+  readonly because: string;
+  readonly source: string;
+}
+
+export interface LoadFactor {
+  readonly load: string;
+  /** Null: no finite limit, or none to be had because the arch does not stand (a check says which). */
+  readonly factor: number | null;
+  readonly hinges: readonly Hinge[];
+}
+
+/** How the arch falls when no line fits: relative rotations at hinges under which the loads do positive work. */
+export interface Mechanism {
+  /** Four hinges or fewer, left to right; `rotation` is relative and positive, the sense follows from `side`. */
+  readonly hinges: readonly (Hinge & { readonly rotation: number })[];
+  /** Work of the loads for the rotations given, kN·m; positive is the proof that no line fits. */
+  readonly work: number;
+}
+
+export interface Proof {
+  /** Largest unbalanced force or moment of any block from the printed forces, over the total weight (and span). */
+  readonly equilibriumResidual: number | null;
+  /** Least thrust as the force of a line of thrust. */
+  readonly static: number | null;
+  /** Least thrust from the virtual work of a mechanism. */
+  readonly kinematic: number | null;
+  /** |static − kinematic| over the greater of their size and the total weight. */
+  readonly gap: number | null;
+}
+
+export interface SchemeAssessment {
+  readonly arch: string;
+  readonly scheme: string;
+  readonly name: string;
+  readonly assumed: readonly Assumed[];
+  readonly model: { readonly joints: readonly Joint[]; readonly blocks: readonly Block[] };
+  readonly crown: CrownBalance | null;
+  readonly thrust: Thrust;
+  /** At the least thrust; null when no line fits. */
+  readonly reactions: { readonly left: Reaction; readonly right: Reaction } | null;
+  readonly geometricSafety: number | null;
+  readonly thinnestRing?: number | null;
+  readonly loadFactors?: readonly LoadFactor[];
+  readonly swayCapacity?: number | null;
+  /** Only when the arch does not stand. */
+  readonly mechanism?: Mechanism | null;
+  readonly checks: readonly Check[];
+  readonly proof: Proof;
+}
+
+export interface Assessment {
+  readonly format: 'skewback.assessment';
+  readonly version: 1;
+  readonly title: string;
+  readonly schemes: readonly SchemeAssessment[];
+}

@@ -1,0 +1,176 @@
+/**
+ * The job document: one source for its types, its validation and the published JSON Schema.
+ *
+ * Plain readonly JSON, only what a person entered, nothing computed. Units: m, kN, kN/m², kN/m³; strengths and moduli
+ * in MPa; angles in degrees. Axes: x to the right, y up, origin on the springing line of the intrados midway between
+ * the springings. Forces are for the whole breadth. Unknown fields are kept on rewriting (`looseObject`), so that a
+ * file from a newer minor edition loses nothing here.
+ */
+import * as v from 'valibot';
+
+export const JOB_FORMAT = 'skewback.job';
+export const JOB_VERSION = 1;
+
+/** Upper limits that keep a hostile or mistaken file from costing minutes or memory. */
+export const LIMITS = {
+  /** Voussoirs in one ring; the solver is linear in them, the drawing is not meant for more. */
+  voussoirs: 100_000,
+  arches: 200,
+  schemes: 200,
+  loads: 5_000,
+  points: 20_000,
+  text: 20_000,
+  /** Any length, m, and any force or intensity, kN. */
+  length: 1_000,
+  force: 1e7,
+} as const;
+
+const text = v.pipe(v.string(), v.maxLength(LIMITS.text));
+const finite = v.pipe(v.number(), v.finite());
+const positive = (max: number) => v.pipe(v.number(), v.finite(), v.gtValue(0), v.maxValue(max));
+const notNegative = (max: number) => v.pipe(v.number(), v.finite(), v.minValue(0), v.maxValue(max));
+const within = (limit: number) => v.pipe(v.number(), v.finite(), v.minValue(-limit), v.maxValue(limit));
+const length = positive(LIMITS.length);
+const place = within(LIMITS.length);
+const id = v.pipe(v.string(), v.minLength(1), v.maxLength(200));
+const point = v.strictTuple([place, place]);
+
+const span = { span: length, step: v.optional(place) };
+const spanAndRise = { ...span, rise: length };
+
+export const profileSchema = v.variant('shape', [
+  v.looseObject({ shape: v.literal('semicircular'), ...span }),
+  v.looseObject({ shape: v.literal('segmental'), ...spanAndRise }),
+  v.looseObject({ shape: v.literal('pointed'), ...spanAndRise }),
+  v.looseObject({ shape: v.literal('three-centred'), ...spanAndRise, haunchRadius: v.optional(length) }),
+  v.looseObject({
+    shape: v.literal('four-centred'),
+    ...spanAndRise,
+    haunchRadius: length,
+    /** Degrees from the springing line to the joint between haunch arc and crown arc. */
+    haunchAngle: positive(90),
+  }),
+  v.looseObject({ shape: v.literal('horseshoe'), ...spanAndRise }),
+  v.looseObject({ shape: v.literal('elliptical'), ...spanAndRise }),
+  v.looseObject({ shape: v.literal('parabolic'), ...spanAndRise }),
+  v.looseObject({ shape: v.literal('catenary'), ...spanAndRise }),
+  v.looseObject({
+    shape: v.literal('flat'),
+    ...span,
+    /** Degrees from the horizontal to the skewback; 90 is a vertical end. */
+    skewbackAngle: positive(90),
+    /** Rise of the soffit at mid-span, m. */
+    camber: notNegative(LIMITS.length),
+  }),
+  v.looseObject({
+    shape: v.literal('measured'),
+    /** Intrados, left springing to right springing. */
+    points: v.pipe(v.array(point), v.minLength(3), v.maxLength(LIMITS.points)),
+    extrados: v.optional(v.pipe(v.array(point), v.minLength(2), v.maxLength(LIMITS.points))),
+    step: v.optional(place),
+  }),
+]);
+
+export const ringSchema = v.looseObject({
+  /** Radial thickness, m; at the crown where `springingThickness` differs. */
+  thickness: length,
+  voussoirs: v.optional(v.pipe(v.number(), v.integer(), v.minValue(2), v.maxValue(LIMITS.voussoirs))),
+  joints: v.optional(v.picklist(['radial', 'vertical'])),
+});
+
+export const masonrySchema = v.looseObject({
+  name: v.optional(text),
+  /** kN/m³. */
+  unitWeight: v.optional(notNegative(200)),
+  /** Compressive strength, MPa; null when it is not known. */
+  strength: v.optional(v.nullable(positive(1_000))),
+  /** Coefficient of friction of the joints; null when it is not known. */
+  friction: v.optional(v.nullable(positive(10))),
+});
+
+export const aboveSchema = v.looseObject({
+  kind: v.picklist(['none', 'wall', 'fill']),
+  /** Height over the crown extrados, m. */
+  height: v.optional(notNegative(LIMITS.length)),
+  unitWeight: v.optional(notNegative(200)),
+});
+
+export const loadSchema = v.variant('kind', [
+  v.looseObject({
+    id,
+    name: v.optional(text),
+    kind: v.literal('point'),
+    x: place,
+    /** kN, downwards, on the whole breadth. */
+    force: within(LIMITS.force),
+  }),
+  v.looseObject({
+    id,
+    name: v.optional(text),
+    kind: v.literal('strip'),
+    from: place,
+    to: place,
+    /** kN/m² on the whole breadth, downwards. */
+    intensity: within(LIMITS.force),
+  }),
+]);
+
+export const supportSchema = v.looseObject({ kind: v.picklist(['rigid']) });
+
+export const schemeSchema = v.looseObject({
+  id,
+  name: v.optional(text),
+  role: v.optional(v.picklist(['as-found', 'proposal'])),
+  profile: profileSchema,
+  ring: ringSchema,
+  breadth: length,
+  masonry: v.optional(masonrySchema),
+  above: v.optional(aboveSchema),
+  loads: v.optional(v.pipe(v.array(loadSchema), v.maxLength(LIMITS.loads))),
+  /** Horizontal acceleration as a share of gravity, + to the right. */
+  sway: v.optional(within(10)),
+  supports: v.optional(v.looseObject({ left: v.optional(supportSchema), right: v.optional(supportSchema) })),
+  /** What the assessor asks for beyond standing; a ring that holds with less is called narrow. */
+  asked: v.optional(v.looseObject({ geometricSafety: v.optional(v.pipe(finite, v.minValue(1), v.maxValue(100))) })),
+});
+
+export const archSchema = v.looseObject({
+  id,
+  name: v.optional(text),
+  schemes: v.pipe(v.array(schemeSchema), v.minLength(1), v.maxLength(LIMITS.schemes)),
+});
+
+export const siteSchema = v.looseObject({
+  place: v.optional(text),
+  reference: v.optional(text),
+  surveyedBy: v.optional(text),
+  surveyedOn: v.optional(text),
+  notes: v.optional(text),
+});
+
+export const jobSchema = v.looseObject({
+  format: v.literal(JOB_FORMAT),
+  version: v.literal(JOB_VERSION),
+  title: v.optional(text),
+  site: v.optional(siteSchema),
+  arches: v.pipe(v.array(archSchema), v.minLength(1), v.maxLength(LIMITS.arches)),
+});
+
+/** Readonly all the way down, with the index signature of loose objects taken off so that a misspelt field is an error. */
+type Deep<T> = T extends readonly unknown[]
+  ? { readonly [Key in keyof T]: Deep<T[Key]> }
+  : T extends object
+    ? { readonly [Key in keyof T as string extends Key ? never : Key]: Deep<T[Key]> }
+    : T;
+
+export type Job = Deep<v.InferOutput<typeof jobSchema>>;
+export type Site = Deep<v.InferOutput<typeof siteSchema>>;
+export type Arch = Deep<v.InferOutput<typeof archSchema>>;
+export type Scheme = Deep<v.InferOutput<typeof schemeSchema>>;
+export type Profile = Deep<v.InferOutput<typeof profileSchema>>;
+export type ProfileShape = Profile['shape'];
+export type Ring = Deep<v.InferOutput<typeof ringSchema>>;
+export type Masonry = Deep<v.InferOutput<typeof masonrySchema>>;
+export type Above = Deep<v.InferOutput<typeof aboveSchema>>;
+export type Load = Deep<v.InferOutput<typeof loadSchema>>;
+export type Support = Deep<v.InferOutput<typeof supportSchema>>;
