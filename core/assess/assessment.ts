@@ -6,16 +6,13 @@
  * springings. Thrust is positive in compression. No field is ever NaN or infinite: what cannot be computed is null
  * and a check says why. Fields marked optional belong to questions that were not asked of this scheme.
  */
+import type { Assumed } from '../job/assumed.ts';
+
+export type { Assumed };
+
 export interface Point {
   readonly x: number;
   readonly y: number;
-}
-
-/** A default that was used because the job gives no value. */
-export interface Assumed {
-  readonly field: string;
-  readonly value: number | string | null;
-  readonly because: string;
 }
 
 export interface Joint {

@@ -1,0 +1,224 @@
+/**
+ * The values that stand in for what a job does not say, each with its source.
+ *
+ * They are starting points for an assessor, not design values. Every one that weighs on an answer is listed as
+ * `Assumed`; what is merely absent (no loads, no sway, level springings, no name) is filled without a word.
+ */
+import type { Assumed } from './assumed.ts';
+import type { Above, Load, Masonry, Profile, Ring, Scheme, Support } from './schema.ts';
+
+/** Every field given; `null` only where the value is not known and nothing sensible stands in for it. */
+type Filled<T> = T extends unknown ? { readonly [Key in keyof T]-?: Exclude<T[Key], undefined> } : never;
+
+type MeasuredProfile = Extract<Profile, { shape: 'measured' }>;
+
+/** A profile with its step and, where it has one, its haunch radius. A measured one may still lack an extrados. */
+export type ResolvedProfile =
+  | Filled<Exclude<Profile, MeasuredProfile>>
+  | (Omit<MeasuredProfile, 'step'> & { readonly step: number });
+export type ResolvedRing = Filled<Ring>;
+export type ResolvedMasonry = Filled<Masonry>;
+export type ResolvedAbove = Filled<Above>;
+export type ResolvedLoad = Filled<Load>;
+
+/** A scheme with nothing left open; the same units and axes as the job. */
+export interface ResolvedScheme {
+  readonly id: string;
+  readonly name: string;
+  readonly role: 'as-found' | 'proposal';
+  readonly profile: ResolvedProfile;
+  readonly ring: ResolvedRing;
+  readonly breadth: number;
+  readonly masonry: ResolvedMasonry;
+  readonly above: ResolvedAbove;
+  readonly loads: readonly ResolvedLoad[];
+  readonly sway: number;
+  readonly supports: { readonly left: Support; readonly right: Support };
+  readonly asked: { readonly geometricSafety: number };
+}
+
+const VOUSSOIRS = 21;
+const VOUSSOIRS_WITH_CROWN_JOINT = 20;
+const UNIT_WEIGHT = 22;
+const FRICTION = 0.6;
+const ABOVE_UNIT_WEIGHT = { wall: 20, fill: 18 } as const;
+const GEOMETRIC_SAFETY = 2;
+
+/**
+ * Fills every optional field of a scheme.
+ *
+ * @param index the scheme's place in its arch; the first is the arch as found, the rest are proposals.
+ */
+export function resolveScheme(scheme: Scheme, index = 0): { resolved: ResolvedScheme; assumed: Assumed[] } {
+  const assumed: Assumed[] = [];
+  const role = scheme.role ?? (index === 0 ? 'as-found' : 'proposal');
+  const resolved: ResolvedScheme = {
+    id: scheme.id,
+    name: scheme.name ?? (role === 'as-found' ? 'As found' : `Proposal ${Math.max(index, 1)}`),
+    role,
+    profile: resolveProfile(scheme.profile, assumed),
+    ring: resolveRing(scheme, assumed),
+    breadth: scheme.breadth,
+    masonry: resolveMasonry(scheme.masonry ?? {}, assumed),
+    above: resolveAbove(scheme.above, assumed),
+    loads: (scheme.loads ?? []).map((load) => ({ ...load, name: load.name ?? load.id })),
+    sway: scheme.sway ?? 0,
+    supports: resolveSupports(scheme.supports ?? {}, assumed),
+    asked: { geometricSafety: scheme.asked?.geometricSafety ?? assumeSafety(assumed) },
+  };
+  return { resolved, assumed };
+}
+
+function resolveProfile(profile: Profile, assumed: Assumed[]): ResolvedProfile {
+  const step = profile.step ?? 0;
+  if (profile.shape !== 'three-centred') return { ...profile, step };
+  return { ...profile, step, haunchRadius: profile.haunchRadius ?? assumeHaunchRadius(profile.span, profile.rise, assumed) };
+}
+
+function assumeHaunchRadius(span: number, rise: number, assumed: Assumed[]): number {
+  const value = classicalHaunchRadius(span, rise);
+  assumed.push({
+    field: 'profile.haunchRadius',
+    value,
+    because:
+      'No haunch radius is given; the classical setting-out of a three-centred arch is taken, ' +
+      'r = c (c − (a − f)) / 2a with c = √(a² + f²), a the half-span and f the rise (common practice).',
+  });
+  return value;
+}
+
+/**
+ * Radius of the haunch arcs in the classical setting-out of a three-centred arch, m (common practice): with a the
+ * half-span, f the rise and c = √(a² + f²), r = c (c − (a − f)) / 2a. It lies below the rise as long as f < a.
+ */
+export function classicalHaunchRadius(span: number, rise: number): number {
+  const half = span / 2;
+  const chord = Math.hypot(half, rise);
+  return (chord * (chord - (half - rise))) / span;
+}
+
+/** The number of voussoirs taken where none was counted: odd for a keystone, even where two arcs meet at the crown. */
+export function usualVoussoirs(shape: Profile['shape']): number {
+  return shape === 'pointed' || shape === 'four-centred' ? VOUSSOIRS_WITH_CROWN_JOINT : VOUSSOIRS;
+}
+
+function resolveRing(scheme: Scheme, assumed: Assumed[]): ResolvedRing {
+  const { ring, profile } = scheme;
+  return {
+    ...ring,
+    voussoirs: ring.voussoirs ?? assumeVoussoirs(profile.shape, assumed),
+    joints: ring.joints ?? assumeJoints(assumed),
+  };
+}
+
+function assumeVoussoirs(shape: Profile['shape'], assumed: Assumed[]): number {
+  const value = usualVoussoirs(shape);
+  const crown = value % 2 === 0 ? 'a joint at the crown' : 'a keystone';
+  assumed.push({
+    field: 'ring.voussoirs',
+    value,
+    because: `The voussoirs were not counted; ${value} with ${crown} are taken (common practice). A ring can only hinge at its joints, so count them where it matters.`,
+  });
+  return value;
+}
+
+function assumeJoints(assumed: Assumed[]): 'radial' {
+  assumed.push({
+    field: 'ring.joints',
+    value: 'radial',
+    because: 'The direction of the joints is not recorded; square to the intrados is taken (common practice).',
+  });
+  return 'radial';
+}
+
+function resolveMasonry(masonry: Masonry, assumed: Assumed[]): ResolvedMasonry {
+  const { unitWeight, friction, strength } = masonry;
+  if (unitWeight === undefined) {
+    assumed.push({
+      field: 'masonry.unitWeight',
+      value: UNIT_WEIGHT,
+      because: 'No unit weight is given; 22 kN/m³ of squared ashlar is taken (Circolare 2019, Table C8.5.I).',
+    });
+  }
+  if (strength === undefined) {
+    assumed.push({
+      field: 'masonry.strength',
+      value: null,
+      because: 'No compressive strength is given and none is taken; crushing is left unchecked until one is known.',
+    });
+  }
+  if (friction === undefined) {
+    assumed.push({
+      field: 'masonry.friction',
+      value: FRICTION,
+      because:
+        'No friction is given; 0.6 is taken, the usual figure for an assessment (from memory; typical, verify; 0.4 is cautious).',
+    });
+  }
+  return {
+    ...masonry,
+    name: masonry.name ?? 'not recorded',
+    unitWeight: unitWeight ?? UNIT_WEIGHT,
+    strength: strength ?? null,
+    friction: friction === undefined ? FRICTION : friction,
+  };
+}
+
+function resolveAbove(above: Above | undefined, assumed: Assumed[]): ResolvedAbove {
+  if (above === undefined) {
+    assumed.push({
+      field: 'above.kind',
+      value: 'none',
+      because: 'Nothing is said of what the ring carries above it; it is taken as bare.',
+    });
+    return { kind: 'none', height: 0, unitWeight: 0 };
+  }
+  if (above.kind === 'none') return { ...above, height: 0, unitWeight: 0 };
+  const { kind, height, unitWeight } = above;
+  if (height === undefined) {
+    assumed.push({
+      field: 'above.height',
+      value: 0,
+      because: `No height is given for the ${kind} above; it is taken to end level with the crown of the extrados.`,
+    });
+  }
+  if (unitWeight === undefined) {
+    assumed.push({
+      field: 'above.unitWeight',
+      value: ABOVE_UNIT_WEIGHT[kind],
+      because:
+        kind === 'wall'
+          ? 'No unit weight is given for the wall above; 20 kN/m³ of roughly dressed masonry is taken (Circolare 2019, Table C8.5.I).'
+          : 'No unit weight is given for the fill above; 18 kN/m³ is taken, between sand and gravel at 15–16 and hardcore at 18.5–19.5 (EN 1991-1-1 Annex A, from memory; typical, verify).',
+    });
+  }
+  return { ...above, height: height ?? 0, unitWeight: unitWeight ?? ABOVE_UNIT_WEIGHT[kind] };
+}
+
+const RIGID: Support = { kind: 'rigid' };
+
+function resolveSupports(supports: NonNullable<Scheme['supports']>, assumed: Assumed[]): ResolvedScheme['supports'] {
+  const taken = 'taken to neither spread, sink nor turn (the usual first step).';
+  const { left, right } = supports;
+  if (left === undefined && right === undefined) {
+    assumed.push({ field: 'supports', value: 'rigid', because: `The supports are not described; they are ${taken}` });
+  } else if (left === undefined || right === undefined) {
+    const side = left === undefined ? 'left' : 'right';
+    assumed.push({
+      field: `supports.${side}`,
+      value: 'rigid',
+      because: `The ${side} support is not described; it is ${taken}`,
+    });
+  }
+  return { left: left ?? RIGID, right: right ?? RIGID };
+}
+
+function assumeSafety(assumed: Assumed[]): number {
+  assumed.push({
+    field: 'asked.geometricSafety',
+    value: GEOMETRIC_SAFETY,
+    because:
+      'No margin is asked for; a geometric safety of 2 is taken, which keeps the line within the middle half of the ring (Heyman, from memory; typical, verify).',
+  });
+  return GEOMETRIC_SAFETY;
+}
