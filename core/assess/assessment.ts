@@ -10,29 +10,12 @@ import type { Assumed } from '../job/assumed.ts';
 
 export type { Assumed };
 
-export interface Point {
-  readonly x: number;
-  readonly y: number;
-}
+import type { Point } from '../geometry/point.ts';
+import type { Joint } from '../geometry/ring.ts';
+import type { Block } from '../loading/forces.ts';
 
-export interface Joint {
-  readonly intrados: Point;
-  readonly extrados: Point;
-}
-
-/** One force on one block, acting at (x, y). */
-export interface BlockForce {
-  readonly x: number;
-  readonly y: number;
-  readonly fx: number;
-  readonly fy: number;
-  /** `self-weight`, `above`, `sway`, or the id of the load it comes from. */
-  readonly from: string;
-}
-
-export interface Block {
-  readonly forces: readonly BlockForce[];
-}
+export type { Block, Joint, Point };
+export type { BlockForce } from '../loading/forces.ts';
 
 export type Side = 'intrados' | 'extrados';
 

@@ -1,0 +1,77 @@
+import type { Edge, OffsettableCurve, Curve, ThicknessLaw } from './curve.ts';
+import { arcMoments, type Moments } from './moments.ts';
+import type { Point } from './point.ts';
+import { SmoothCurve } from './smooth-curve.ts';
+
+/** Part of a circle, run clockwise: its parameter is the angle at the centre, falling from left to right. */
+export class Arc implements OffsettableCurve {
+  constructor(
+    readonly centre: Point,
+    readonly radius: number,
+    readonly from: number,
+    readonly to: number,
+  ) {}
+
+  readonly hollowRadius = Infinity;
+  readonly skyward = { from: Math.PI, to: 0 };
+
+  highest(u0: number, u1: number): number {
+    return Math.min(Math.max(Math.PI / 2, Math.min(u0, u1)), Math.max(u0, u1));
+  }
+
+  at(u: number): Point {
+    return { x: this.centre.x + this.radius * Math.cos(u), y: this.centre.y + this.radius * Math.sin(u) };
+  }
+
+  derivative(u: number): Point {
+    return { x: -this.radius * Math.sin(u), y: this.radius * Math.cos(u) };
+  }
+
+  normal(u: number): Point {
+    return { x: Math.cos(u), y: Math.sin(u) };
+  }
+
+  moments(u0: number, u1: number, origin: Point): Moments {
+    return arcMoments(this.centre, this.radius, u0, u1, origin);
+  }
+
+  length(u0: number, u1: number): number {
+    return this.radius * (u0 - u1);
+  }
+
+  parameterAtLength(length: number): number {
+    return this.from - length / this.radius;
+  }
+
+  parameterAtX(x: number): number {
+    return Math.acos(Math.min(1, Math.max(-1, (x - this.centre.x) / this.radius)));
+  }
+
+  edges(u0: number, u1: number): Edge[] {
+    if (u0 === u1) return [];
+    return [{ kind: 'arc', to: this.at(u1), centre: this.centre, radius: this.radius, from: u0, turn: u1 - u0 }];
+  }
+
+  offset(thickness: ThicknessLaw): Curve {
+    return thickness.rate === 0
+      ? new Arc(this.centre, this.radius + thickness.atStart, this.from, this.to)
+      : this.smooth().offset(thickness);
+  }
+
+  part(u0: number, u1: number): Arc {
+    return new Arc(this.centre, this.radius, u0, u1);
+  }
+
+  sheared(slope: number): OffsettableCurve {
+    return slope === 0 ? this : this.smooth().sheared(slope);
+  }
+
+  private smooth(): SmoothCurve {
+    const { centre, radius } = this;
+    return new SmoothCurve(this.from, this.to, (u) => {
+      const x = radius * Math.cos(u);
+      const y = radius * Math.sin(u);
+      return { x: centre.x + x, y: centre.y + y, dx: -y, dy: x, ddx: -x, ddy: -y };
+    });
+  }
+}
