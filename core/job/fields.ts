@@ -1,0 +1,70 @@
+/**
+ * What belongs in each field of the job file, in plain words with its unit: the second half of every message about
+ * a field. A field's name has one meaning throughout the file, so the name alone is the key.
+ */
+import { JOB_FORMAT, JOB_VERSION, LIMITS } from './schema.ts';
+
+const lengthLike = (what: string, example: string): string =>
+  `give ${what} in metres, above 0 and up to ${LIMITS.length}, such as ${example}`;
+const placeLike = (what: string): string =>
+  `give ${what} in metres, between −${LIMITS.length} and ${LIMITS.length}, measured from mid-span, + to the right`;
+const textLike = `give text in double quotes, up to ${LIMITS.text} characters`;
+const identity = 'give a short name of 1 to 200 characters, used once only';
+const weight = 'give kilonewtons per cubic metre, from 0 to 200, such as 22';
+const pointList = (least: number): string =>
+  `give ${least} to ${LIMITS.points} points, each as [x, y] in metres, left springing first`;
+
+const RIGHT: Readonly<Record<string, string>> = {
+  format: `write "${JOB_FORMAT}"`,
+  version: `write ${JOB_VERSION}`,
+  title: textLike,
+  name: textLike,
+  place: textLike,
+  reference: textLike,
+  surveyedBy: textLike,
+  notes: textLike,
+  site: 'give an object with place, reference, surveyedBy, surveyedOn and notes, or leave it out',
+  surveyedOn: 'give a date as year-month-day, such as 2026-05-14, or leave it out',
+  id: identity,
+  arches: `give a list of 1 to ${LIMITS.arches} arches`,
+  schemes: `give a list of 1 to ${LIMITS.schemes} schemes, the arch as found first`,
+  role: 'write "as-found" for the first scheme and "proposal" for the others, or leave it out',
+  profile: 'give an object with a shape and its measures, such as { "shape": "semicircular", "span": 3.2 }',
+  span: lengthLike('the clear width between the springings', '3.2'),
+  rise: lengthLike('the height of the crown over the springing line', '0.8'),
+  step: `give the height of the right springing over the left in metres, between −${LIMITS.length} and ${LIMITS.length}`,
+  haunchRadius: lengthLike('the radius of the haunch arcs', '0.6'),
+  haunchAngle: 'give degrees from the springing line to the end of the haunch arc, above 0 and up to 90, such as 60',
+  skewbackAngle: 'give degrees from the horizontal to the skewback, above 0 and up to 90, such as 70',
+  camber: `give the rise of the soffit at mid-span in metres, from 0 to ${LIMITS.length}, such as 0.02`,
+  points: pointList(3),
+  extrados: pointList(2),
+  ring: 'give an object with at least the thickness, such as { "thickness": 0.35 }',
+  thickness: lengthLike('the thickness of the ring', '0.35'),
+  voussoirs: `give a whole number from 2 to ${LIMITS.voussoirs}, such as 21`,
+  joints: 'write "radial" or "vertical"',
+  breadth: lengthLike('the breadth of the arch from face to face', '0.6'),
+  masonry: 'give an object with name, unitWeight, strength and friction, each as far as known',
+  unitWeight: weight,
+  strength: 'give megapascals, above 0 and up to 1000, such as 5.8, or null when it is not known',
+  friction: 'give a plain number, above 0 and up to 10, such as 0.6, or null when it is not known',
+  above: 'give an object such as { "kind": "wall", "height": 1.2 }',
+  height: `give the height over the crown of the extrados in metres, from 0 to ${LIMITS.length}, such as 1.2`,
+  loads: `give a list of up to ${LIMITS.loads} loads`,
+  x: placeLike('the place of the load'),
+  from: placeLike('the left end of the strip'),
+  to: placeLike('the right end of the strip'),
+  force: `give kilonewtons on the whole breadth, + downwards, between −${LIMITS.force} and ${LIMITS.force}, such as 12`,
+  intensity: `give kilonewtons per square metre, + downwards, between −${LIMITS.force} and ${LIMITS.force}, such as 8`,
+  sway: 'give a horizontal acceleration as a share of gravity, between −10 and 10, + to the right, such as 0.1',
+  supports: 'give an object with left and right, each such as { "kind": "rigid" }',
+  left: 'give an object such as { "kind": "rigid" }',
+  right: 'give an object such as { "kind": "rigid" }',
+  asked: 'give an object such as { "geometricSafety": 2 }',
+  geometricSafety: 'give a plain number from 1 to 100, such as 2',
+};
+
+/** What would be right in a field, by its name; undefined for a name that the job file does not have. */
+export function rightFor(field: string): string | undefined {
+  return Object.hasOwn(RIGHT, field) ? RIGHT[field] : undefined;
+}
