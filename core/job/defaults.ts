@@ -14,8 +14,7 @@ type MeasuredProfile = Extract<Profile, { shape: 'measured' }>;
 
 /** A profile with its step and, where it has one, its haunch radius. A measured one may still lack an extrados. */
 export type ResolvedProfile =
-  | Filled<Exclude<Profile, MeasuredProfile>>
-  | (Omit<MeasuredProfile, 'step'> & { readonly step: number });
+  Filled<Exclude<Profile, MeasuredProfile>> | (Omit<MeasuredProfile, 'step'> & { readonly step: number });
 export type ResolvedRing = Filled<Ring>;
 export type ResolvedMasonry = Filled<Masonry>;
 export type ResolvedAbove = Filled<Above>;
@@ -72,7 +71,11 @@ export function resolveScheme(scheme: Scheme, index = 0): { resolved: ResolvedSc
 function resolveProfile(profile: Profile, assumed: Assumed[]): ResolvedProfile {
   const step = profile.step ?? 0;
   if (profile.shape !== 'three-centred') return { ...profile, step };
-  return { ...profile, step, haunchRadius: profile.haunchRadius ?? assumeHaunchRadius(profile.span, profile.rise, assumed) };
+  return {
+    ...profile,
+    step,
+    haunchRadius: profile.haunchRadius ?? assumeHaunchRadius(profile.span, profile.rise, assumed),
+  };
 }
 
 function assumeHaunchRadius(span: number, rise: number, assumed: Assumed[]): number {

@@ -86,17 +86,21 @@ function wrongWith(issue: Issue): string {
     case 'min_length':
       return typeof issue.input === 'string' ? 'empty' : `must hold at least ${requirement}`;
     case 'max_length':
-      return typeof issue.input === 'string' ? `longer than ${requirement} characters` : `must hold at most ${requirement}`;
+      return typeof issue.input === 'string'
+        ? `longer than ${requirement} characters`
+        : `must hold at most ${requirement}`;
     case 'variant':
       if (issue.expected === 'Object') return 'not an object';
-      return typeof issue.input === 'string' ? `no ${lastName(issue)} that is known` : 'not one of the words known here';
+      return typeof issue.input === 'string'
+        ? `no ${lastName(issue)} that is known`
+        : 'not one of the words known here';
     default:
       return NOT_THIS_TYPE[issue.type] ?? 'not what belongs here';
   }
 }
 
 function lastName(issue: Issue): string {
-  return String(issue.path?.at(-1)?.key ?? 'word');
+  return String(keysOf(issue).at(-1) ?? 'word');
 }
 
 function rightInstead(issue: Issue, keys: readonly (string | number)[]): string {
@@ -104,7 +108,8 @@ function rightInstead(issue: Issue, keys: readonly (string | number)[]): string 
   if (issue.type === 'number' && typeof input === 'string' && input.trim() !== '' && Number.isFinite(Number(input))) {
     return `write ${input.trim()} without the quotes`;
   }
-  if (expected === 'Object' && typeof keys.at(-1) === 'number') return `give an object for each of the ${String(keys.at(-2))}`;
+  if (expected === 'Object' && typeof keys.at(-1) === 'number')
+    return `give an object for each of the ${String(keys.at(-2))}`;
   if (issue.type === 'variant' || issue.type === 'picklist') return oneOf(expected ?? '', lastName(issue));
   const field = keys.findLast((key) => typeof key === 'string') ?? '';
   if (typeof keys.at(-1) === 'number') {

@@ -121,7 +121,11 @@ function endOfString(text: string, start: number): number | Fault {
     if (character === '"') return at + 1;
     if (character === '') return { at: start, found: foundAt(text, start), wanted: 'text with a closing double quote' };
     if (character < ' ') {
-      return { at, found: 'a line break or control character', wanted: 'a closing double quote, or \\n for a line break,' };
+      return {
+        at,
+        found: 'a line break or control character',
+        wanted: 'a closing double quote, or \\n for a line break,',
+      };
     }
     if (character === '\\') {
       ESCAPE.lastIndex = at;

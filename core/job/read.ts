@@ -75,7 +75,12 @@ export function tooLong(characters: number): Problem {
 /** Format and version, before anything else is looked at: one problem that says what kind of file this is. */
 function envelopeProblem(value: unknown): Problem | undefined {
   if (typeof value !== 'object' || value === null || Array.isArray(value)) {
-    return { path: '', value: shown(value), wrong: 'not a job', right: `a job is an object with "format": "${JOB_FORMAT}"` };
+    return {
+      path: '',
+      value: shown(value),
+      wrong: 'not a job',
+      right: `a job is an object with "format": "${JOB_FORMAT}"`,
+    };
   }
   const { format, version } = value as RawDocument;
   if (format === 'skewback.assessment') {
@@ -137,7 +142,11 @@ function structureProblems(root: unknown, rootNode: SchemaNode | undefined): Pro
       }
     }
   };
-  const enter = (container: unknown[] | Record<string, unknown>, key: string | number, node: SchemaNode | undefined): void => {
+  const enter = (
+    container: unknown[] | Record<string, unknown>,
+    key: string | number,
+    node: SchemaNode | undefined,
+  ): void => {
     const inside = container as Record<string | number, unknown>;
     keys.push(key);
     if (key === '__proto__') report('a field name that is not allowed', 'rename it or take it out');

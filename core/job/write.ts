@@ -20,7 +20,8 @@ function written(value: unknown, node: SchemaNode | undefined, indent: string): 
   const inner = `${indent}  `;
   if (Array.isArray(value)) {
     const entries: readonly unknown[] = value;
-    if (entries.every((entry) => typeof entry === 'number')) return `[${entries.map((entry) => JSON.stringify(entry)).join(', ')}]`;
+    if (entries.every((entry) => typeof entry === 'number'))
+      return `[${entries.map((entry) => JSON.stringify(entry)).join(', ')}]`;
     const lines = entries.map((entry) => `${inner}${written(entry, itemOf(node), inner)}`);
     return `[\n${lines.join(',\n')}\n${indent}]`;
   }
