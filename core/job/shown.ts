@@ -12,7 +12,8 @@ export function shown(value: unknown): string {
     const names = Object.keys(value);
     return names.length === 0 ? 'an empty object' : `an object with ${cut(names.slice(0, 6).join(', '))}`;
   }
-  return typeof value === 'string' ? `"${cut(value)}"` : String(value as number | boolean | null);
+  if (typeof value === 'string') return `"${cut(value)}"`;
+  return typeof value === 'number' || typeof value === 'boolean' ? String(value) : 'null';
 }
 
 function cut(text: string): string {
