@@ -6,24 +6,16 @@
  * springings. Thrust is positive in compression. No field is ever NaN or infinite: what cannot be computed is null
  * and a check says why. Fields marked optional belong to questions that were not asked of this scheme.
  */
-import type { Assumed } from '../job/assumed.ts';
-
-export type { Assumed };
-
+import type { Check, Status } from '../checks/check.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/ring.ts';
-import type { Block } from '../loading/forces.ts';
+import type { Assumed } from '../job/assumed.ts';
+import type { Block, BlockForce } from '../loading/forces.ts';
+import type { CrownBalance } from '../statics/crown-balance.ts';
+import type { Hinge, Side } from '../statics/hinge.ts';
+import type { TurningHinge } from '../statics/thrust.ts';
 
-export type { Block, Joint, Point };
-export type { BlockForce } from '../loading/forces.ts';
-
-export type Side = 'intrados' | 'extrados';
-
-/** The line of thrust touches this face at this joint; the joint opens at the other face. */
-export interface Hinge {
-  readonly joint: number;
-  readonly side: Side;
-}
+export type { Assumed, Block, BlockForce, Check, CrownBalance, Hinge, Joint, Point, Side, Status };
 
 /** Where the resultant crosses each joint, joint 0 first; null coordinates where it runs parallel to the joint. */
 export type LinePoint = { readonly x: number; readonly y: number } | { readonly x: null; readonly y: null };
@@ -45,16 +37,6 @@ export interface Reaction {
   readonly y: number | null;
 }
 
-export interface CrownBalance {
-  readonly horizontal: number;
-  readonly leftVertical: number;
-  readonly rightVertical: number;
-  /** Height of mid-ring at the crown over mid-ring at the springings, m. */
-  readonly lever: number;
-  /** Whether the line through mid-ring at crown and springings stays within the ring. */
-  readonly inside: boolean;
-}
-
 export interface Thrust {
   readonly stands: boolean;
   /** Null when no line fits. */
@@ -62,23 +44,6 @@ export interface Thrust {
   readonly greatest: ThrustState | null;
   /** Least and greatest horizontal when joints may also slide and crush; null when no line obeys those too. */
   readonly usable?: { readonly least: number | null; readonly greatest: number | null } | null;
-}
-
-export type Status = 'holds' | 'narrow' | 'fails' | 'unknown';
-
-export interface Check {
-  readonly id: string;
-  readonly title: string;
-  readonly status: Status;
-  readonly demand: number | null;
-  readonly limit: number | null;
-  /** demand / limit. */
-  readonly utilisation: number | null;
-  readonly unit: string;
-  /** Such as `joint 4`, or empty. */
-  readonly where: string;
-  readonly because: string;
-  readonly source: string;
 }
 
 export interface LoadFactor {
@@ -91,7 +56,7 @@ export interface LoadFactor {
 /** How the arch falls when no line fits: relative rotations at hinges under which the loads do positive work. */
 export interface Mechanism {
   /** Four hinges or fewer, left to right; `rotation` is relative and positive, the sense follows from `side`. */
-  readonly hinges: readonly (Hinge & { readonly rotation: number })[];
+  readonly hinges: readonly TurningHinge[];
   /** Work of the loads for the rotations given, kN·m; positive is the proof that no line fits. */
   readonly work: number;
 }

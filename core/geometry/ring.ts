@@ -70,7 +70,7 @@ export function buildRing(form: RingForm): RingGeometry {
 }
 
 /** The ring with one more joint, plumb or square like the others, at the crown; and the crown joint's number. */
-export function ringSplitAtCrown(form: RingForm): { ring: RingGeometry; crown: number } {
+export function buildRingSplitAtCrown(form: RingForm): { ring: RingGeometry; crown: number } {
   const pieces = ringPieces(form.profile, form.thickness);
   const stations = stationsOf(pieces, form.voussoirs, form.joints);
   const place = highestPlace(pieces);

@@ -1,0 +1,57 @@
+import { figure } from '../quantity/figures.ts';
+import { jointsInWords, type Check } from './check.ts';
+
+/** What the check needs to know of the ring. */
+export interface CompressionState {
+  readonly stands: boolean;
+  /** Thickness of the ring where the line needs most of it, m. */
+  readonly thickness: number;
+  /** Smallest share of every joint, about its middle, in which a line fits; null when no thickness would do. */
+  readonly share: number | null;
+  /** The joints at which that line touches the shrunken ring, or turns when the ring falls. */
+  readonly joints: readonly number[];
+  /** Geometric safety that the assessor asks for. */
+  readonly askedSafety: number;
+}
+
+const SOURCE =
+  'Safe theorem of limit analysis applied to masonry: J. Heyman, The stone skeleton, Int. J. Solids Structures 2 (1966) 249–279 (from memory)';
+
+/** Does a line of thrust fit in the ring, and in how much of it? Demand and limit are ring thicknesses in metres. */
+export function compressionOnly(state: CompressionState): Check {
+  const { stands, thickness, share, joints, askedSafety } = state;
+  const demand = share === null ? null : share * thickness;
+  const safety = share === null || share === 0 ? null : 1 / share;
+  // a line down the very middle leaves the whole ring in hand
+  const enough = share === 0 || (safety !== null && safety >= askedSafety);
+  return {
+    id: 'ring.compression-only',
+    title: 'Ring in compression alone',
+    status: !stands ? 'fails' : enough ? 'holds' : 'narrow',
+    demand,
+    limit: thickness,
+    utilisation: share,
+    unit: 'm',
+    where: jointsInWords(joints),
+    joints,
+    because: reason(state, demand, safety),
+    source: SOURCE,
+  };
+}
+
+function reason(state: CompressionState, demand: number | null, safety: number | null): string {
+  const { stands, thickness, askedSafety } = state;
+  if (!stands) {
+    const wanting =
+      demand === null
+        ? 'no ring of this shape would hold one, however thick'
+        : `it would have to be about ${figure(demand)} m thick, about its present middle, to hold one`;
+    return `No line of thrust fits within the ring of ${figure(thickness)} m; ${wanting}. The loads can turn the ring about the hinges named.`;
+  }
+  if (demand === null || safety === null) return 'A line of thrust runs through the middle of every joint.';
+  const against =
+    safety >= askedSafety
+      ? `at least the ${figure(askedSafety)} asked for`
+      : `less than the ${figure(askedSafety)} asked for`;
+  return `A line of thrust fits within the middle ${figure(demand)} m of a ring of ${figure(thickness)} m: geometric safety ${figure(safety)}, ${against}.`;
+}

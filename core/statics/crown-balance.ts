@@ -1,0 +1,83 @@
+/**
+ * The moment balance about the crown as done by hand: the ring as two halves, hinged at mid-ring on both springings
+ * and at the crown. Horizontal thrust H = P (a − x̄)/h for a half of weight P whose centre lies x̄ from the crown, with
+ * the springing at a and the crown h above it; common practice. Halves may differ; then both balances are solved together.
+ */
+import { midpoint, type Point } from '../geometry/point.ts';
+import { buildRingSplitAtCrown, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import type { Block } from '../loading/forces.ts';
+import { crossing } from './line.ts';
+import { momentAbout, ringSystem, type RingSystem } from './system.ts';
+
+export interface CrownBalance {
+  /** kN, at the left springing. */
+  readonly horizontal: number;
+  /** Vertical load on each springing, kN, positive downwards. */
+  readonly leftVertical: number;
+  readonly rightVertical: number;
+  /** Height of mid-ring at the crown over the middle of the two springings' mid-ring, m. */
+  readonly lever: number;
+  /** Whether this line stays within the ring at every joint. */
+  readonly inside: boolean;
+}
+
+/** A share of a joint beyond its ends that still counts as on it: rounding only. */
+const ON_EDGE = 1e-9;
+
+/**
+ * @param load puts the scheme's forces on a ring; called with the ring cut at the crown.
+ * @returns null when the three hinges stand in one line and no balance exists.
+ */
+export function crownBalance(form: RingForm, load: (ring: RingGeometry) => readonly Block[]): CrownBalance | null {
+  const { ring, crown } = buildRingSplitAtCrown(form);
+  if (crown <= 0 || crown >= ring.joints.length - 1) return null;
+  const system = ringSystem(ring.joints, load(ring));
+  const last = system.joints - 1;
+  const state = throughMidRing(system, [0, crown, last]);
+  if (state === null) return null;
+  const middles = [0, crown, last].map((j) => {
+    const joint = ring.joints[j];
+    return joint ? midpoint(joint.intrados, joint.extrados) : { x: 0, y: 0 };
+  }) as [Point, Point, Point];
+  let inside = true;
+  for (let j = 0; j <= last; j++) {
+    const share = crossing(system, state, j);
+    if (share !== null && (share < -ON_EDGE || share > 1 + ON_EDGE)) inside = false;
+  }
+  const { force } = system.frame;
+  return {
+    horizontal: state[0] * force,
+    leftVertical: state[1] * force,
+    rightVertical: -(state[1] + (system.sums.fy[last] as number)) * force,
+    lever: middles[1].y - (middles[0].y + middles[2].y) / 2,
+    inside,
+  };
+}
+
+/** The state whose resultant passes mid-ring at three joints, by Cramer's rule; null when those three stand in one line. */
+function throughMidRing(system: RingSystem, joints: readonly [number, number, number]): [number, number, number] | null {
+  const rows = joints.map((j) => {
+    const px = ((system.ix[j] as number) + (system.ex[j] as number)) / 2;
+    const py = ((system.iy[j] as number) + (system.ey[j] as number)) / 2;
+    return { px, py, moment: -momentAbout(system.sums, j, px, py) };
+  }) as [Row, Row, Row];
+  const [p, q, r] = rows;
+  // py·X − px·Y + M = moment at each; subtracting the first removes M
+  const a = q.py - p.py;
+  const b = -(q.px - p.px);
+  const c = r.py - p.py;
+  const d = -(r.px - p.px);
+  const determinant = a * d - b * c;
+  if (Math.abs(determinant) < 1e-12) return null;
+  const e = q.moment - p.moment;
+  const f = r.moment - p.moment;
+  const x = (e * d - b * f) / determinant;
+  const y = (a * f - e * c) / determinant;
+  return [x, y, p.moment - p.py * x + p.px * y];
+}
+
+interface Row {
+  readonly px: number;
+  readonly py: number;
+  readonly moment: number;
+}
