@@ -1,0 +1,134 @@
+/**
+ * Dimensions as construction drawings have them (ISO 129): thin lines, oblique strokes at their ends, the figure over
+ * the line and read from below or from the right. Each figure knows the field that it states, so that the screen can
+ * let it be typed.
+ */
+import type { Point } from '../geometry/point.ts';
+import { put, type Draught } from './draught.ts';
+import { heightAt } from './faces.ts';
+import { along, lettering, stroke } from './path.ts';
+import type { Placing } from './places.ts';
+import type { About, PathItem } from './scene.ts';
+import { textWidth } from './text.ts';
+
+/** Paper mm. */
+const STROKE = 3;
+const OVERRUN = 2;
+const GAP = 1;
+const LETTERS = 2.5;
+const OVER_LINE = 1;
+const SPAN_DROP = 10;
+const RING_TAIL = 14;
+
+export function drawDimensions(draught: Draught): void {
+  const lines = [spanLine(draught), ...riseLine(draught), ...heightLine(draught)];
+  const ring = ringLine(draught);
+  // All lines first: a figure may not lie on a line that is drawn after it.
+  for (const { paths } of [...lines, ring]) {
+    put(draught, 'dimensions', ...paths);
+    for (const path of paths) draught.places.blockPath(path);
+  }
+  for (const { label, middle } of [...lines, ring]) {
+    const placed = draught.places.placeSurely(label, middle);
+    put(draught, 'dimensions', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
+  }
+}
+
+interface Dimension {
+  readonly paths: readonly PathItem[];
+  readonly label: readonly Placing[];
+  readonly middle: Point;
+}
+
+/** Between two points of the dimension line itself, with lines that lead there from what is measured. */
+function dimension(draught: Draught, a: Point, b: Point, measured: readonly [Point, Point], text: string, about?: About): Dimension {
+  const { mm } = draught;
+  const angle = Math.atan2(b.y - a.y, b.x - a.x);
+  const paths = [stroke('dimension', along(a, angle, -mm(OVERRUN)), along(b, angle, mm(OVERRUN)), about)];
+  for (const [end, from] of [[a, measured[0]], [b, measured[1]]] as const) {
+    const out = Math.hypot(end.x - from.x, end.y - from.y);
+    if (out > mm(GAP)) {
+      const direction = Math.atan2(end.y - from.y, end.x - from.x);
+      paths.push(stroke('dimension', along(from, direction, mm(GAP)), along(end, direction, mm(OVERRUN))));
+    }
+    const oblique = angle + Math.PI / 4;
+    paths.push(stroke('dimension-stroke', along(end, oblique, -mm(STROKE / 2)), along(end, oblique, mm(STROKE / 2))));
+  }
+  const middle = { x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 };
+  return { paths, middle, label: figurePlaces(draught, a, b, text, about) };
+}
+
+/** Over the middle of the line, over its thirds, under it, then beyond either end. */
+function figurePlaces({ mm }: Draught, a: Point, b: Point, text: string, about?: About): Placing[] {
+  const angle = readable(Math.atan2(b.y - a.y, b.x - a.x));
+  const at = (share: number, up: number, beyond = 0): Placing => {
+    const on = { x: a.x + share * (b.x - a.x), y: a.y + share * (b.y - a.y) };
+    return [lettering(text, along(on, angle, mm(beyond), mm(up)), { align: 'middle', angle, about })];
+  };
+  const under = -(OVER_LINE + LETTERS);
+  const half = textWidth(text, LETTERS) / 2 + OVERRUN + 1;
+  const forwards = Math.cos(angle - Math.atan2(b.y - a.y, b.x - a.x)) > 0 ? 1 : -1;
+  return [
+    ...[0.5, 0.3, 0.7].map((share) => at(share, OVER_LINE)),
+    ...[0.5, 0.3, 0.7].map((share) => at(share, under)),
+    at(1, OVER_LINE, forwards * half),
+    at(0, OVER_LINE, -forwards * half),
+  ];
+}
+
+/** The same direction or its opposite, whichever reads from below or from the right. */
+function readable(angle: number): number {
+  const turned = Math.atan2(Math.sin(angle), Math.cos(angle));
+  if (turned > Math.PI / 2 + 1e-9) return turned - Math.PI;
+  return turned <= -Math.PI / 2 + 1e-9 ? turned + Math.PI : turned;
+}
+
+const aboutField = (path: string): About => ({ kind: 'field', path });
+
+function spanLine(draught: Draught): Dimension {
+  const { ring, mm, length } = draught;
+  const left = ring.joints[0]!.intrados;
+  const right = ring.joints.at(-1)!.intrados;
+  const y = Math.min(left.y, right.y) - mm(SPAN_DROP);
+  return dimension(draught, { x: left.x, y }, { x: right.x, y }, [left, right], length(right.x - left.x), aboutField('profile.span'));
+}
+
+/** From the springing line up to the soffit at the crown. */
+function riseLine(draught: Draught): Dimension[] {
+  const { ring, resolved, length } = draught;
+  const { profile } = resolved;
+  const left = ring.joints[0]!.intrados;
+  const right = ring.joints.at(-1)!.intrados;
+  const rampant = left.y !== right.y;
+  const x = rampant ? (left.x + right.x) / 2 : ring.crownIntrados.x;
+  const top = { x, y: rampant ? (heightAt(draught.soffit, x) ?? ring.crownIntrados.y) : ring.crownIntrados.y };
+  const foot = { x, y: left.y + ((x - left.x) / (right.x - left.x)) * (right.y - left.y) };
+  if (!(top.y > foot.y)) return [];
+  const about = 'rise' in profile ? aboutField('profile.rise') : profile.shape === 'flat' ? aboutField('profile.camber') : undefined;
+  return [dimension(draught, foot, top, [foot, top], length(top.y - foot.y), about)];
+}
+
+/** From the crown of the extrados to the top of what lies above; up to the break where it is broken off. */
+function heightLine(draught: Draught): Dimension[] {
+  const { ring, resolved, top, length } = draught;
+  if (resolved.above.kind === 'none' || resolved.above.height === 0) return [];
+  const foot = ring.crownExtrados;
+  const head = { x: foot.x, y: top.level };
+  return [dimension(draught, foot, head, [foot, head], length(resolved.above.height), aboutField('above.height'))];
+}
+
+/** Along a joint at a haunch, its tail in the opening where the figure has room. */
+function ringLine(draught: Draught): Dimension {
+  const { ring, mm, length, joints, places } = draught;
+  const tries = [0.24, 0.3, 0.18, 0.36, 0.76, 0.7, 0.82, 0.64].map((share) => joints[Math.round(share * (joints.length - 1))]!);
+  const dimensions = tries.map((number) => {
+    const { intrados, extrados } = ring.joints[number]!;
+    const inwards = Math.atan2(intrados.y - extrados.y, intrados.x - extrados.x);
+    const tail = along(intrados, inwards, mm(RING_TAIL));
+    const { paths } = dimension(draught, extrados, intrados, [extrados, intrados], '');
+    const text = length(Math.hypot(extrados.x - intrados.x, extrados.y - intrados.y));
+    const label = figurePlaces(draught, along(intrados, inwards, mm(OVERRUN)), tail, text, aboutField('ring.thickness'));
+    return { paths: [...paths, stroke('dimension', intrados, tail)], label, middle: tail };
+  });
+  return dimensions.find(({ label }) => label.slice(0, 1).some((placing) => places.isFree(placing))) ?? dimensions[0]!;
+}

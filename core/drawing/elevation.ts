@@ -1,0 +1,45 @@
+/** The elevation of one arch: the drawing that the board shows, and the one that goes onto the sheet. */
+import type { AssessedScheme } from '../assess/assess.ts';
+import { headline } from '../checks/headline.ts';
+import { drawDimensions } from './dimensions.ts';
+import { beginDraught, type LengthText } from './draught.ts';
+import { metres } from '../quantity/figures.ts';
+import { drawLoads } from './loads.ts';
+import { drawMasonry } from './masonry.ts';
+import { drawMechanism } from './mechanism.ts';
+import { drawNotes } from './notes.ts';
+import { drawReactions } from './reactions.ts';
+import { makeScene, type Scene } from './scene.ts';
+import { plainText } from './text.ts';
+import { drawThrust } from './thrust.ts';
+
+export interface ElevationOptions {
+  /** Paper millimetres per metre of the arch: 50 at 1:20. On a screen, pixels per metre over pixels per millimetre. */
+  readonly millimetresPerMetre: number;
+  /** How lengths are lettered; metres where not given. */
+  readonly length?: LengthText;
+}
+
+/**
+ * Pure and without a clock: the same arch at the same scale is always drawn the same. When the arch does not stand there
+ * are no lines of thrust, and the mechanism is drawn where the assessment has one.
+ */
+export function elevation(assessed: AssessedScheme, options: ElevationOptions): Scene {
+  const { millimetresPerMetre, length = metres } = options;
+  const draught = beginDraught(assessed, millimetresPerMetre, length);
+  drawMasonry(draught);
+  drawThrust(draught);
+  drawMechanism(draught);
+  drawLoads(draught);
+  drawDimensions(draught);
+  drawReactions(draught);
+  drawNotes(draught);
+  const title = plainText(assessed.result.name);
+  return makeScene({ title, description: headlineOf(assessed.result), millimetresPerUnit: millimetresPerMetre }, draught.items);
+}
+
+/** The finding in plain words, as it heads the findings and the sheet. */
+export function headlineOf({ thrust, geometricSafety }: AssessedScheme['result']): string {
+  const { stands, least, greatest } = thrust;
+  return headline({ stands, geometricSafety, least: least?.horizontal ?? null, greatest: greatest?.horizontal ?? null });
+}

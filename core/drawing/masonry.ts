@@ -1,0 +1,105 @@
+/** The stone itself: voussoirs with their true outlines, joints, what lies above, and the supports they spring from. */
+import type { Point } from '../geometry/point.ts';
+import type { Outline } from '../geometry/ring.ts';
+import { put, type Draught } from './draught.ts';
+import { along, linesTo, outlined, polygon, polyline, stroke } from './path.ts';
+import type { About, PathItem } from './scene.ts';
+
+export function drawMasonry(draught: Draught): void {
+  drawAbove(draught);
+  drawVoussoirs(draught);
+  drawSupports(draught);
+}
+
+function drawVoussoirs(draught: Draught): void {
+  const { ring, joints, places, soffit, back } = draught;
+  for (let i = 0; i + 1 < joints.length; i++) {
+    const left = joints[i]!;
+    const right = joints[i + 1]!;
+    put(draught, 'voussoirs', outlined('stone', stone(draught, left, right), { kind: 'block', block: left }));
+    places.block(corners(draught, left, right));
+  }
+  for (const joint of joints) {
+    const { intrados, extrados } = ring.joints[joint]!;
+    put(draught, 'joints', stroke('joint', intrados, extrados, { kind: 'joint', joint }));
+  }
+  const face = { kind: 'path', role: 'ring-edge', closed: false } as const;
+  const ends = [ring.joints[0]!, ring.joints.at(-1)!];
+  put(draught, 'joints', { ...face, ...soffit }, { ...face, ...back });
+  for (const { intrados, extrados } of ends) put(draught, 'joints', stroke('ring-edge', intrados, extrados));
+}
+
+/** One block, or several drawn as one where their joints would run together. */
+function stone(draught: Draught, left: number, right: number): Outline {
+  const { ring } = draught;
+  if (right === left + 1) return ring.outline(left);
+  const [start, ...rest] = corners(draught, left, right);
+  return { start, edges: linesTo([...rest, start]) };
+}
+
+function corners({ ring }: Draught, left: number, right: number): [Point, Point, Point, Point] {
+  const a = ring.joints[left]!;
+  const b = ring.joints[right]!;
+  return [a.intrados, b.intrados, b.extrados, a.extrados];
+}
+
+function drawAbove(draught: Draught): void {
+  const { resolved, ring, sky, top, joints, mm } = draught;
+  if (resolved.above.kind === 'none') return;
+  const about: About = { kind: 'field', path: 'above.height' };
+  const topLeft = { x: sky.left.x, y: top.level };
+  const topRight = { x: sky.right.x, y: top.level };
+  // The ring is painted over the lower edge of this figure, so mid-ring is near enough for it.
+  const midRing = joints.map((joint) => {
+    const { intrados, extrados } = ring.joints[joint]!;
+    return { x: (intrados.x + extrados.x) / 2, y: (intrados.y + extrados.y) / 2 };
+  });
+  put(draught, 'above', polygon('above', [sky.left, topLeft, topRight, sky.right, ...midRing.reverse()], about));
+  const edges = [
+    polyline('above-edge', [sky.left, topLeft]),
+    polyline('above-edge', [sky.right, topRight]),
+    top.broken ? breakLine(topLeft, topRight, mm) : stroke('above-edge', topLeft, topRight, about),
+  ];
+  for (const edge of edges) {
+    put(draught, 'above', edge);
+    draught.places.blockPath(edge);
+  }
+}
+
+/** Hatching at a support grows coarser rather than denser when the screen is near. */
+const MOST_STROKES = 40;
+
+/** A level line with two zigzags: the wall goes on beyond the paper. */
+function breakLine(from: Point, to: Point, mm: (millimetres: number) => number): PathItem {
+  const points: [Point, ...Point[]] = [from];
+  for (const share of [0.25, 0.75]) {
+    const x = from.x + share * (to.x - from.x);
+    points.push({ x: x - mm(1.5), y: from.y }, { x: x - mm(0.5), y: from.y + mm(2) });
+    points.push({ x: x + mm(0.5), y: from.y - mm(2) }, { x: x + mm(1.5), y: from.y });
+  }
+  return polyline('above-edge', [...points, to]);
+}
+
+/** Each springing joint as a firm line with the ground's hatching behind it, and the chain line between the springings. */
+function drawSupports(draught: Draught): void {
+  const { ring, mm, places } = draught;
+  const left = ring.joints[0]!;
+  const right = ring.joints.at(-1)!;
+  for (const [side, { intrados, extrados }] of [['left', left], ['right', right]] as const) {
+    const about: About = { kind: 'support', side };
+    const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
+    const from = along(intrados, outwards, -mm(1.5));
+    const length = Math.hypot(extrados.x - from.x, extrados.y - from.y) + mm(3);
+    const behind = side === 'left' ? 1 : -1;
+    put(draught, 'supports', stroke('support', from, along(from, outwards, length), about));
+    const gap = Math.max(mm(1.5), length / MOST_STROKES);
+    for (let at = gap; at <= length; at += gap) {
+      const foot = along(from, outwards, at);
+      put(draught, 'supports', stroke('support-hatch', foot, along(foot, outwards, -mm(1.2), behind * mm(1.8)), about));
+    }
+    places.block([from, along(from, outwards, length), along(from, outwards, length, behind * mm(1.8)), along(from, outwards, -mm(1.2), behind * mm(1.8))]);
+  }
+  const springing = stroke('datum', left.intrados, right.intrados);
+  put(draught, 'springing', springing);
+  places.blockPath(springing);
+}

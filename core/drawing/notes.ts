@@ -1,0 +1,70 @@
+/** Quiet lettering on the elevation: joint numbers and what the wall or fill is. Left out where there is no room. */
+import type { Hinge } from '../assess/assessment.ts';
+import { put, type Draught } from './draught.ts';
+import { figure } from '../quantity/figures.ts';
+import { along, lettering } from './path.ts';
+import type { Placing } from './places.ts';
+import { CAPITAL_HEIGHT, textWidth } from './text.ts';
+
+/** Paper mm. */
+const LETTERS = 1.8;
+const FROM_FACE = 2.4;
+
+export function drawNotes(draught: Draught): void {
+  drawBreadth(draught);
+  drawAboveNote(draught);
+  drawJointNumbers(draught);
+}
+
+/** Under the span's figure: the one measure that an elevation cannot show. */
+function drawBreadth(draught: Draught): void {
+  const { ring, resolved, mm, places, length } = draught;
+  const left = ring.joints[0]!.intrados;
+  const right = ring.joints.at(-1)!.intrados;
+  const at = { x: (left.x + right.x) / 2, y: Math.min(left.y, right.y) - mm(15.5) };
+  const text = lettering(`breadth ${length(resolved.breadth)}`, at, { align: 'middle', about: { kind: 'field', path: 'breadth' } });
+  const placed = places.placeSurely([[text]], at);
+  put(draught, 'dimensions', ...placed.texts);
+}
+
+function drawAboveNote(draught: Draught): void {
+  const { resolved, sky, top, mm, places } = draught;
+  const { kind, unitWeight } = resolved.above;
+  if (kind === 'none') return;
+  const words = `${kind} above, ${figure(unitWeight)} kN/m³`;
+  const width = mm(textWidth(words, 2.5) + 4);
+  if (width > sky.right.x - sky.left.x) return;
+  const placings: Placing[] = [];
+  for (const down of [4.5, 9, 14, 20, 28, 38]) {
+    const y = top.level - mm(down);
+    placings.push([lettering(words, { x: sky.left.x + mm(2), y }, { role: 'text-quiet' })]);
+    placings.push([lettering(words, { x: sky.right.x - mm(2), y }, { role: 'text-quiet', align: 'end' })]);
+  }
+  put(draught, 'notes', ...(places.place(placings) ?? []));
+}
+
+/** Numbers at the springings, at the hinges, and at every fifth or tenth joint; inside the opening first. */
+function drawJointNumbers(draught: Draught): void {
+  const { ring, joints, mm, places } = draught;
+  const last = ring.joints.length - 1;
+  const every = last <= 12 ? 1 : last <= 40 ? 5 : 10 ** Math.ceil(Math.log10(last / 40));
+  const hinges = new Set(hingesOf(draught).map((hinge) => hinge.joint));
+  const wanted = joints.filter((joint) => joint === 0 || joint === last || joint % every === 0 || hinges.has(joint));
+  // Hinges first: theirs are the numbers that the findings speak of.
+  const ordered = [...wanted.filter((joint) => hinges.has(joint)), ...wanted.filter((joint) => !hinges.has(joint))];
+  for (const joint of ordered) {
+    const { intrados, extrados } = ring.joints[joint]!;
+    const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
+    const number = (centre: { x: number; y: number }): Placing => [
+      lettering(String(joint), { x: centre.x, y: centre.y - mm(LETTERS / 2) }, { height: LETTERS, align: 'middle', role: 'text-quiet', about: { kind: 'joint', joint } }),
+    ];
+    const away = mm(FROM_FACE + textWidth(String(joint), LETTERS) / 2 - LETTERS * CAPITAL_HEIGHT * 0.3);
+    const placings = [number(along(intrados, outwards, -away)), number(along(extrados, outwards, away))];
+    put(draught, 'notes', ...(places.place(placings) ?? []));
+  }
+}
+
+function hingesOf({ result }: Draught): readonly Hinge[] {
+  const { least, greatest } = result.thrust;
+  return [...(least?.hinges ?? []), ...(greatest?.hinges ?? []), ...(result.mechanism?.hinges ?? [])];
+}
