@@ -35,7 +35,7 @@ export function draftStore(folder: string): DraftStore {
   const fileOf = (id: string): string => join(folder, `${id}${ENDING}`);
   return {
     async keep({ id, title, path }, bytes, now) {
-      if (!GOOD_ID.test(id)) return failed('A draft cannot be kept under that name.');
+      if (!GOOD_ID.test(id)) return failed('a draft is named by letters, digits and hyphens');
       const head = new TextEncoder().encode(`${JSON.stringify({ title, path, keptAt: now.toISOString() })}\n`);
       return saveWholeInFolder(fileOf(id), Buffer.concat([head, bytes]));
     },

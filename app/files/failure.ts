@@ -1,11 +1,12 @@
-import type { Outcome } from '../host.ts';
-
-/** What became of something that asks no person, so cannot be cancelled. */
-export type Settled<Value> = Exclude<Outcome<Value>, { readonly kind: 'cancelled' }>;
+/** What became of reading or writing a file. */
+export type Settled<Value> =
+  | { readonly kind: 'done'; readonly value: Value }
+  /** Why not, as a clause without a full stop: `the disk is full`. The shell that asked makes a sentence of it. */
+  | { readonly kind: 'failed'; readonly because: string };
 
 export const done = <Value>(value: Value): Settled<Value> => ({ kind: 'done', value });
 
-export const failed = (reason: string): Settled<never> => ({ kind: 'failed', reason });
+export const failed = (because: string): Settled<never> => ({ kind: 'failed', because });
 
 /** System error codes in plain words. */
 const WORDS: Readonly<Record<string, string>> = {
@@ -27,7 +28,7 @@ const WORDS: Readonly<Record<string, string>> = {
   ETXTBSY: 'another program holds it',
 };
 
-/** A system error as a clause without a full stop: `the disk is full`. */
+/** A system error as a clause. */
 export function clauseFor(error: unknown): string {
   if (!(error instanceof Error)) return String(error);
   const code = 'code' in error && typeof error.code === 'string' ? error.code : '';

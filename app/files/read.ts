@@ -15,8 +15,8 @@ export async function readWithin(path: string, limit = LARGEST_FILE): Promise<Se
     const handle = await open(path, constants.O_RDONLY | constants.O_NONBLOCK);
     try {
       const { size, isFile } = await handle.stat().then((stat) => ({ size: stat.size, isFile: stat.isFile() }));
-      if (!isFile) return failed(`${path} cannot be read: it is not a file.`);
-      if (size > limit) return failed(tooLarge(path, limit));
+      if (!isFile) return failed('it is not a file');
+      if (size > limit) return failed(tooLarge(limit));
       // One byte more than was promised shows a file that is still growing.
       const bytes = new Uint8Array(size + 1);
       let filled = 0;
@@ -25,20 +25,19 @@ export async function readWithin(path: string, limit = LARGEST_FILE): Promise<Se
         if (bytesRead === 0) break;
         filled += bytesRead;
       }
-      if (filled > size) return failed(`${path} cannot be read: another program is writing to it.`);
+      if (filled > size) return failed('another program is writing to it');
       return done(bytes.subarray(0, filled));
     } finally {
       await handle.close();
     }
   } catch (error) {
-    return failed(`${path} cannot be read: ${clauseFor(error)}.`);
+    return failed(clauseFor(error));
   }
 }
 
-/** The whole of a stream such as standard input, within the same limit. `name` is how a person knows it. */
+/** The whole of a stream such as standard input, within the same limit. */
 export async function readStreamWithin(
   stream: AsyncIterable<unknown>,
-  name: string,
   limit = LARGEST_FILE,
 ): Promise<Settled<Uint8Array>> {
   const chunks: Uint8Array[] = [];
@@ -47,14 +46,13 @@ export async function readStreamWithin(
     for await (const chunk of stream) {
       const bytes = chunk instanceof Uint8Array ? chunk : Buffer.from(String(chunk));
       length += bytes.length;
-      if (length > limit) return failed(tooLarge(name, limit));
+      if (length > limit) return failed(tooLarge(limit));
       chunks.push(bytes);
     }
   } catch (error) {
-    return failed(`${name} cannot be read: ${clauseFor(error)}.`);
+    return failed(clauseFor(error));
   }
   return done(Buffer.concat(chunks, length));
 }
 
-const tooLarge = (name: string, limit: number): string =>
-  `${name} cannot be read: it is larger than ${Math.floor(limit / 1_000_000)} MB.`;
+const tooLarge = (limit: number): string => `it is larger than ${Math.floor(limit / 1_000_000)} MB`;

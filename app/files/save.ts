@@ -18,7 +18,7 @@ export async function saveWhole(path: string, bytes: Uint8Array): Promise<Settle
     .then(() => replace(path, bytes))
     .then(
       () => done(null),
-      (error: unknown) => failed(`${path} cannot be written: ${clauseFor(error)}.`),
+      (error: unknown) => failed(clauseFor(error)),
     );
   underWay.set(path, saving);
   const outcome = await saving;
@@ -32,7 +32,7 @@ export async function saveWholeInFolder(path: string, bytes: Uint8Array): Promis
   try {
     await mkdir(folder, { recursive: true });
   } catch (error) {
-    return failed(`The folder ${folder} cannot be made: ${clauseFor(error)}.`);
+    return failed(`its folder cannot be made: ${clauseFor(error)}`);
   }
   return saveWhole(path, bytes);
 }

@@ -100,7 +100,7 @@ describe('a save that cannot be', () => {
       return saveWhole(path, bytes('new'));
     });
     await fs.chmod(folder, 0o755);
-    expect(outcome).toEqual({ kind: 'failed', reason: `${path} cannot be written: permission is denied.` });
+    expect(outcome).toEqual({ kind: 'failed', because: 'permission is denied' });
     expect(await fs.readFile(path, 'utf8')).toBe('old');
   });
 
@@ -109,14 +109,14 @@ describe('a save that cannot be', () => {
     await fs.writeFile(path, 'old');
     await fs.chmod(path, 0o444);
     const outcome = await asNobody(() => saveWhole(path, bytes('new')));
-    expect(outcome).toEqual({ kind: 'failed', reason: `${path} cannot be written: permission is denied.` });
+    expect(outcome).toEqual({ kind: 'failed', because: 'permission is denied' });
     expect(await fs.readFile(path, 'utf8')).toBe('old');
   });
 
   test('says that the folder is gone', async () => {
     const path = join(folder, 'gone', 'a.skewback');
-    const reason = `${path} cannot be written: there is no such file or folder.`;
-    expect(await saveWhole(path, bytes('new'))).toEqual({ kind: 'failed', reason });
+    const because = 'there is no such file or folder';
+    expect(await saveWhole(path, bytes('new'))).toEqual({ kind: 'failed', because });
   });
 
   test('does not replace a folder', async () => {
@@ -124,11 +124,11 @@ describe('a save that cannot be', () => {
     expect((await fs.stat(folder)).isDirectory()).toBe(true);
   });
 
-  test('a folder that cannot be made is named', async () => {
+  test('a folder that cannot be made is said to be the cause', async () => {
     await fs.writeFile(join(folder, 'file'), '');
     const path = join(folder, 'file', 'elevation.svg');
-    const reason = `The folder ${join(folder, 'file')} cannot be made: there is already a file of that name.`;
-    expect(await saveWholeInFolder(path, bytes('new'))).toEqual({ kind: 'failed', reason });
+    const because = 'its folder cannot be made: there is already a file of that name';
+    expect(await saveWholeInFolder(path, bytes('new'))).toEqual({ kind: 'failed', because });
   });
 
   test('on a disk reported full, the old file stands and nothing is left beside it', async () => {
@@ -139,7 +139,7 @@ describe('a save that cannot be', () => {
     await probe.close();
     vi.spyOn(handles, 'sync').mockRejectedValue(Object.assign(new Error('ENOSPC: no space'), { code: 'ENOSPC' }));
     const outcome = await saveWhole(path, bytes('new'));
-    expect(outcome).toEqual({ kind: 'failed', reason: `${path} cannot be written: the disk is full.` });
+    expect(outcome).toEqual({ kind: 'failed', because: 'the disk is full' });
     expect(await fs.readFile(path, 'utf8')).toBe('old');
     expect(await fs.readdir(folder)).toEqual(['a.skewback']);
   });
@@ -159,7 +159,7 @@ test('a disk that fills up half-way through: the old file stands, whole, and not
     await fs.writeFile(path, 'old');
     // The first 60 kB go through: a writer that does not look at how much was taken would keep just those.
     const outcome = await saveWhole(path, new Uint8Array(200_000));
-    expect(outcome).toEqual({ kind: 'failed', reason: `${path} cannot be written: the disk is full.` });
+    expect(outcome).toEqual({ kind: 'failed', because: 'the disk is full' });
     expect(await fs.readFile(path, 'utf8')).toBe('old');
     expect(await fs.readdir(disk)).toEqual(['a.skewback']);
   } finally {
