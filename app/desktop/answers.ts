@@ -144,11 +144,10 @@ async function write(path: string, bytes: Uint8Array): Promise<Exclude<Outcome<n
   return { kind: 'failed', reason: `${basename(path)} cannot be written: ${saved.because}.` };
 }
 
-/** A name that every system takes: no folders, no reserved signs, not hidden, not empty. */
+/** A name that every system takes: no folders, no reserved signs, not hidden, not empty, its ending kept. */
 export function fileName(suggested: string): string {
-  const plain = suggested
-    .replace(/[\p{Cc}<>:"/\\|?*]+/gu, ' ')
-    .replace(/^[\s.]+|[\s.]+$/g, '')
-    .slice(0, 200);
-  return plain === '' ? 'unnamed' : plain;
+  const plain = suggested.replace(/[\p{Cc}<>:"/\\|?*\s]+/gu, ' ').replace(/ (?=[.])|^[ .]+|[ .]+$/g, '');
+  const ending = extname(plain);
+  const stem = basename(plain, ending).slice(0, 180);
+  return plain === '' ? 'unnamed' : `${stem}${ending.slice(0, 20)}`;
 }
