@@ -78,8 +78,8 @@ function assess(arch: Arch, resolved: ResolvedScheme, assumed: readonly Assumed[
     scheme: resolved.id,
     name: `${arch.name ?? arch.id} / ${resolved.name}`,
     assumed,
-    model: { joints: ring.joints, blocks },
-    crown: crownBalance(form, (split) => loadRing(split, resolved)),
+    model: { joints: ring.joints.map(({ intrados, extrados }) => ({ intrados, extrados })), blocks },
+    crown: crownBalance(ring, system, (split) => loadRing(split, resolved)),
     thrust: printedThrust(system, ring, answer, line),
     reactions: springings === null ? null : { left: printedReaction(springings.left), right: printedReaction(springings.right) },
     geometricSafety: stands && middle !== null && middle.share > 0 ? 1 / middle.share : null,
@@ -162,6 +162,7 @@ function compressionCheck(
     stands: answer.stands,
     thickness: governing ? distance(governing.intrados, governing.extrados) : 0,
     share: middle?.share ?? null,
+    endlessThrust: middle !== null && middle.state === null,
     joints,
     askedSafety,
   });

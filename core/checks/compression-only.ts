@@ -8,6 +8,8 @@ export interface CompressionState {
   readonly thickness: number;
   /** Smallest share of every joint, about its middle, in which a line fits; null when no thickness would do. */
   readonly share: number | null;
+  /** Whether that share is only approached as the thrust grows without limit. */
+  readonly endlessThrust: boolean;
   /** The joints at which that line touches the shrunken ring, or turns when the ring falls. */
   readonly joints: readonly number[];
   /** Geometric safety that the assessor asks for. */
@@ -48,10 +50,13 @@ function reason(state: CompressionState, demand: number | null, safety: number |
         : `it would have to be about ${figure(demand)} m thick, about its present middle, to hold one`;
     return `No line of thrust fits within the ring of ${figure(thickness)} m; ${wanting}. The loads can turn the ring about the hinges named.`;
   }
-  if (demand === null || safety === null) return 'A line of thrust runs through the middle of every joint.';
+  const supports = state.endlessThrust
+    ? ' The line comes this near the middle only as the thrust grows, so it asks what holds the arch to take any thrust.'
+    : '';
+  if (demand === null || safety === null) return `A line of thrust runs through the middle of every joint.${supports}`;
   const against =
     safety >= askedSafety
       ? `at least the ${figure(askedSafety)} asked for`
       : `less than the ${figure(askedSafety)} asked for`;
-  return `A line of thrust fits within the middle ${figure(demand)} m of a ring of ${figure(thickness)} m: geometric safety ${figure(safety)}, ${against}.`;
+  return `A line of thrust fits within the middle ${figure(demand)} m of a ring of ${figure(thickness)} m: geometric safety ${figure(safety)}, ${against}.${supports}`;
 }

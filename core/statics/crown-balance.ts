@@ -4,7 +4,7 @@
  * the springing at a and the crown h above it; common practice. Halves may differ; then both balances are solved together.
  */
 import { midpoint, type Point } from '../geometry/point.ts';
-import { buildRingSplitAtCrown, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import type { RingGeometry } from '../geometry/ring.ts';
 import type { Block } from '../loading/forces.ts';
 import { crossing } from './line.ts';
 import { momentAbout, ringSystem, type RingSystem } from './system.ts';
@@ -25,13 +25,18 @@ export interface CrownBalance {
 const ON_EDGE = 1e-9;
 
 /**
- * @param load puts the scheme's forces on a ring; called with the ring cut at the crown.
+ * @param system the ring with its loads.
+ * @param load puts the same loads on the ring cut at the crown; called only where no joint stands there.
  * @returns null when the three hinges stand in one line and no balance exists.
  */
-export function crownBalance(form: RingForm, load: (ring: RingGeometry) => readonly Block[]): CrownBalance | null {
-  const { ring, crown } = buildRingSplitAtCrown(form);
+export function crownBalance(
+  whole: RingGeometry,
+  wholeSystem: RingSystem,
+  load: (ring: RingGeometry) => readonly Block[],
+): CrownBalance | null {
+  const { ring, crown } = whole.splitAtCrown();
   if (crown <= 0 || crown >= ring.joints.length - 1) return null;
-  const system = ringSystem(ring.joints, load(ring));
+  const system = ring === whole ? wholeSystem : ringSystem(ring.joints, load(ring));
   const last = system.joints - 1;
   const state = throughMidRing(system, [0, crown, last]);
   if (state === null) return null;
