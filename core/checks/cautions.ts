@@ -40,7 +40,10 @@ export function raisedCautions({ thrust, geometricSafety, assumed }: SchemeAsses
     });
   }
   if (assumed.some(({ field }) => field === 'ring.voussoirs')) {
-    raised.push({ id: 'joints-not-counted', text: 'The joints were not counted. A ring hinges only at its joints: count them where it matters.' });
+    raised.push({
+      id: 'joints-not-counted',
+      text: 'The joints were not counted. A ring hinges only at its joints: count them where it matters.',
+    });
   }
   return raised;
 }

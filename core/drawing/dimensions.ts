@@ -4,6 +4,7 @@
  * let it be typed.
  */
 import type { Point } from '../geometry/point.ts';
+import type { Joint } from '../geometry/ring.ts';
 import { put, type Draught } from './draught.ts';
 import { heightAt } from './faces.ts';
 import { along, lettering, stroke } from './path.ts';
@@ -16,7 +17,8 @@ const STROKE = 3;
 const OVERRUN = 2;
 const GAP = 1;
 const LETTERS = 2.5;
-const OVER_LINE = 1;
+/** Clear of the oblique strokes at the ends, with the clearance that lettering keeps. */
+const OVER_LINE = 1.8;
 const SPAN_DROP = 10;
 const RING_TAIL = 14;
 
@@ -41,11 +43,21 @@ interface Dimension {
 }
 
 /** Between two points of the dimension line itself, with lines that lead there from what is measured. */
-function dimension(draught: Draught, a: Point, b: Point, measured: readonly [Point, Point], text: string, about?: About): Dimension {
+function dimension(
+  draught: Draught,
+  a: Point,
+  b: Point,
+  measured: readonly [Point, Point],
+  text: string,
+  about?: About,
+): Dimension {
   const { mm } = draught;
   const angle = Math.atan2(b.y - a.y, b.x - a.x);
   const paths = [stroke('dimension', along(a, angle, -mm(OVERRUN)), along(b, angle, mm(OVERRUN)), about)];
-  for (const [end, from] of [[a, measured[0]], [b, measured[1]]] as const) {
+  for (const [end, from] of [
+    [a, measured[0]],
+    [b, measured[1]],
+  ] as const) {
     const out = Math.hypot(end.x - from.x, end.y - from.y);
     if (out > mm(GAP)) {
       const direction = Math.atan2(end.y - from.y, end.x - from.x);
@@ -90,7 +102,14 @@ function spanLine(draught: Draught): Dimension {
   const left = ring.joints[0]!.intrados;
   const right = ring.joints.at(-1)!.intrados;
   const y = Math.min(left.y, right.y) - mm(SPAN_DROP);
-  return dimension(draught, { x: left.x, y }, { x: right.x, y }, [left, right], length(right.x - left.x), aboutField('profile.span'));
+  return dimension(
+    draught,
+    { x: left.x, y },
+    { x: right.x, y },
+    [left, right],
+    length(right.x - left.x),
+    aboutField('profile.span'),
+  );
 }
 
 /** From the springing line up to the soffit at the crown. */
@@ -104,7 +123,12 @@ function riseLine(draught: Draught): Dimension[] {
   const top = { x, y: rampant ? (heightAt(draught.soffit, x) ?? ring.crownIntrados.y) : ring.crownIntrados.y };
   const foot = { x, y: left.y + ((x - left.x) / (right.x - left.x)) * (right.y - left.y) };
   if (!(top.y > foot.y)) return [];
-  const about = 'rise' in profile ? aboutField('profile.rise') : profile.shape === 'flat' ? aboutField('profile.camber') : undefined;
+  const about =
+    'rise' in profile
+      ? aboutField('profile.rise')
+      : profile.shape === 'flat'
+        ? aboutField('profile.camber')
+        : undefined;
   return [dimension(draught, foot, top, [foot, top], length(top.y - foot.y), about)];
 }
 
@@ -117,18 +141,39 @@ function heightLine(draught: Draught): Dimension[] {
   return [dimension(draught, foot, head, [foot, head], length(resolved.above.height), aboutField('above.height'))];
 }
 
-/** Along a joint at a haunch, its tail in the opening where the figure has room. */
+/** Across the ring at a haunch, its tail in the opening where the figure has room. */
 function ringLine(draught: Draught): Dimension {
   const { ring, mm, length, joints, places } = draught;
-  const tries = [0.24, 0.3, 0.18, 0.36, 0.76, 0.7, 0.82, 0.64].map((share) => joints[Math.round(share * (joints.length - 1))]!);
-  const dimensions = tries.map((number) => {
-    const { intrados, extrados } = ring.joints[number]!;
+  const dimensions = RING_SHARES.map((share) => {
+    const joint = ring.joints[joints[Math.round(share * (joints.length - 1))]!]!;
+    const { intrados, extrados } =
+      draught.resolved.ring.joints === 'radial' ? joint : squareAt(draught, joint.intrados);
     const inwards = Math.atan2(intrados.y - extrados.y, intrados.x - extrados.x);
     const tail = along(intrados, inwards, mm(RING_TAIL));
     const { paths } = dimension(draught, extrados, intrados, [extrados, intrados], '');
     const text = length(Math.hypot(extrados.x - intrados.x, extrados.y - intrados.y));
-    const label = figurePlaces(draught, along(intrados, inwards, mm(OVERRUN)), tail, text, aboutField('ring.thickness'));
+    const label = figurePlaces(
+      draught,
+      along(intrados, inwards, mm(OVERRUN)),
+      tail,
+      text,
+      aboutField('ring.thickness'),
+    );
     return { paths: [...paths, stroke('dimension', intrados, tail)], label, middle: tail };
   });
   return dimensions.find(({ label }) => label.slice(0, 1).some((placing) => places.isFree(placing))) ?? dimensions[0]!;
+}
+
+/** Where along the ring its thickness may be dimensioned, in order of preference. */
+const RING_SHARES = [0.24, 0.3, 0.18, 0.36, 0.76, 0.7, 0.82, 0.64];
+
+/** The thickness square to the soffit at one of its points, for a ring whose joints stand plumb. */
+function squareAt({ resolved, soffit }: Draught, intrados: Point): Joint {
+  const edge = soffit.edges.find(({ to }) => to.x >= intrados.x);
+  const from = soffit.edges[soffit.edges.indexOf(edge!) - 1]?.to ?? soffit.start;
+  const outwards =
+    edge?.kind === 'arc'
+      ? Math.atan2(intrados.y - edge.centre.y, intrados.x - edge.centre.x)
+      : Math.atan2((edge?.to.y ?? 0) - from.y, (edge?.to.x ?? 1) - from.x) + Math.PI / 2;
+  return { intrados, extrados: along(intrados, outwards, resolved.ring.thickness) };
 }

@@ -6,7 +6,7 @@ import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
 import { blockBack, blockSoffit, drawnJoints, mergeArcs } from './faces.ts';
 import { Places } from './places.ts';
-import { addItems, type Items, type LayerName, type SceneItem } from './scene.ts';
+import { addItems, type Items, type KeyEntry, type LayerName, type SceneItem } from './scene.ts';
 
 /** How lengths, in metres, are lettered; the screen may hand in feet and inches. */
 export type LengthText = (metres: number) => string;
@@ -17,6 +17,8 @@ export interface Draught extends AssessedScheme {
   readonly mm: (millimetres: number) => number;
   readonly length: LengthText;
   readonly items: Items;
+  /** Filled where a number is lettered instead of a name. */
+  readonly key: KeyEntry[];
   readonly places: Places;
   /** Joints that are drawn, by number: all of them unless they would run together on paper. */
   readonly joints: readonly number[];
@@ -35,7 +37,7 @@ export interface FacePath {
 }
 
 /** A wall taller than this share of the arch's larger measure is broken off on paper. */
-const TALLEST_ABOVE = 0.6;
+const TALLEST_ABOVE = 0.4;
 
 export function beginDraught(assessed: AssessedScheme, millimetresPerMetre: number, length: LengthText): Draught {
   const { ring, resolved } = assessed;
@@ -55,6 +57,7 @@ export function beginDraught(assessed: AssessedScheme, millimetresPerMetre: numb
     mm,
     length,
     items: new Map(),
+    key: [],
     places: new Places(millimetresPerMetre),
     joints: drawnJoints(ring, mm(CLOSEST_JOINTS)),
     soffit,

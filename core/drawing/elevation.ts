@@ -35,11 +35,20 @@ export function elevation(assessed: AssessedScheme, options: ElevationOptions): 
   drawReactions(draught);
   drawNotes(draught);
   const title = plainText(assessed.result.name);
-  return makeScene({ title, description: headlineOf(assessed.result), millimetresPerUnit: millimetresPerMetre }, draught.items);
+  return makeScene(
+    { title, description: headlineOf(assessed.result), millimetresPerUnit: millimetresPerMetre },
+    draught.items,
+    draught.key,
+  );
 }
 
 /** The finding in plain words, as it heads the findings and the sheet. */
 export function headlineOf({ thrust, geometricSafety }: AssessedScheme['result']): string {
   const { stands, least, greatest } = thrust;
-  return headline({ stands, geometricSafety, least: least?.horizontal ?? null, greatest: greatest?.horizontal ?? null });
+  return headline({
+    stands,
+    geometricSafety,
+    least: least?.horizontal ?? null,
+    greatest: greatest?.horizontal ?? null,
+  });
 }

@@ -1,7 +1,7 @@
 /** How far drawn things reach: boxes of paths with true arcs, and the four corners of a line of lettering. */
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
-import { ASCENT, DESCENT, emOf, textWidth, type Face } from './text.ts';
+import { ASCENT, descentOf, emOf, textWidth, type Face } from './text.ts';
 
 export interface Box {
   readonly left: number;
@@ -24,7 +24,10 @@ export function boxOf(points: readonly Point[]): Box | null {
 
 /** Start, ends of edges, and the points where an arc reaches furthest. */
 export function pathPoints(path: { readonly start: Point; readonly edges: readonly Edge[] }): Point[] {
-  return [path.start, ...path.edges.flatMap((edge) => (edge.kind === 'line' ? [edge.to] : [...arcExtremes(edge), edge.to]))];
+  return [
+    path.start,
+    ...path.edges.flatMap((edge) => (edge.kind === 'line' ? [edge.to] : [...arcExtremes(edge), edge.to])),
+  ];
 }
 
 function arcExtremes({ centre, radius, from, turn }: Extract<Edge, { kind: 'arc' }>): Point[] {
@@ -54,6 +57,7 @@ const ALIGNED = { start: 0, middle: 0.5, end: 1 } as const;
 export function textCorners(text: Lettered, millimetresPerUnit: number): [Point, Point, Point, Point] {
   const em = emOf(text.height) / millimetresPerUnit;
   const length = textWidth(text.text, text.height, text.face) / millimetresPerUnit;
+  const low = -descentOf(text.text) * em;
   const start = -ALIGNED[text.align] * length;
   const cos = Math.cos(text.angle);
   const sin = Math.sin(text.angle);
@@ -62,8 +66,8 @@ export function textCorners(text: Lettered, millimetresPerUnit: number): [Point,
     y: text.at.y + along * sin + up * cos,
   });
   return [
-    corner(start, -DESCENT * em),
-    corner(start + length, -DESCENT * em),
+    corner(start, low),
+    corner(start + length, low),
     corner(start + length, ASCENT * em),
     corner(start, ASCENT * em),
   ];

@@ -40,7 +40,9 @@ function reversed(start: Point, edges: readonly Edge[]): Edge[] {
   return edges
     .map((edge, i): Edge => {
       const to = i === 0 ? start : edges[i - 1]!.to;
-      return edge.kind === 'line' ? { kind: 'line', to } : { ...edge, to, from: edge.from + edge.turn, turn: -edge.turn };
+      return edge.kind === 'line'
+        ? { kind: 'line', to }
+        : { ...edge, to, from: edge.from + edge.turn, turn: -edge.turn };
     })
     .reverse();
 }
@@ -83,7 +85,10 @@ export function heightAt(path: { readonly start: Point; readonly edges: readonly
   let height: number | null = null;
   for (const edge of path.edges) {
     if ((from.x - x) * (edge.to.x - x) <= 0) {
-      const y = edge.kind === 'line' ? lineHeight(from, edge.to, x) : edge.centre.y + Math.sqrt(Math.max(0, edge.radius ** 2 - (x - edge.centre.x) ** 2));
+      const y =
+        edge.kind === 'line'
+          ? lineHeight(from, edge.to, x)
+          : edge.centre.y + Math.sqrt(Math.max(0, edge.radius ** 2 - (x - edge.centre.x) ** 2));
       height = Math.max(height ?? -Infinity, y);
     }
     from = edge.to;

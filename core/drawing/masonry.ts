@@ -85,7 +85,10 @@ function drawSupports(draught: Draught): void {
   const { ring, mm, places } = draught;
   const left = ring.joints[0]!;
   const right = ring.joints.at(-1)!;
-  for (const [side, { intrados, extrados }] of [['left', left], ['right', right]] as const) {
+  for (const [side, { intrados, extrados }] of [
+    ['left', left],
+    ['right', right],
+  ] as const) {
     const about: About = { kind: 'support', side };
     const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
     const from = along(intrados, outwards, -mm(1.5));
@@ -97,7 +100,12 @@ function drawSupports(draught: Draught): void {
       const foot = along(from, outwards, at);
       put(draught, 'supports', stroke('support-hatch', foot, along(foot, outwards, -mm(1.2), behind * mm(1.8)), about));
     }
-    places.block([from, along(from, outwards, length), along(from, outwards, length, behind * mm(1.8)), along(from, outwards, -mm(1.2), behind * mm(1.8))]);
+    places.block([
+      from,
+      along(from, outwards, length),
+      along(from, outwards, length, behind * mm(1.8)),
+      along(from, outwards, -mm(1.2), behind * mm(1.8)),
+    ]);
   }
   const springing = stroke('datum', left.intrados, right.intrados);
   put(draught, 'springing', springing);

@@ -11,8 +11,8 @@ import { bodyOutline } from './faces.ts';
 import { outlined } from './path.ts';
 import { drawHinge } from './thrust.ts';
 
-/** The largest movement drawn, as a share of the ring's thickness. */
-const LARGEST_MOVEMENT = 0.45;
+/** The largest movement drawn: this share of the ring's thickness, or these paper mm where that would hardly be seen. */
+const LARGEST_MOVEMENT = { share: 0.45, least: 5 } as const;
 /** Turns beyond this, radians, would no longer look like small ones. */
 const LARGEST_TURN = 0.12;
 
@@ -27,7 +27,9 @@ export function drawMechanism(draught: Draught): void {
     const [left, right] = [ends[i]!, ends[i + 1]!];
     const motion = motions[left + 1]!;
     if (speedAt(motion, ring.joints[left]!.intrados) + speedAt(motion, ring.joints[right]!.intrados) === 0) continue;
-    put(draught, 'mechanism', outlined('ghost', moved(bodyOutline(ring, left, right), drawnMotion(motion, scale))));
+    const ghost = outlined('ghost', moved(bodyOutline(ring, left, right), drawnMotion(motion, scale)));
+    put(draught, 'mechanism', ghost);
+    draught.places.blockPath(ghost);
   }
   for (const hinge of hinges) {
     put(draught, 'hinges', ...drawHinge(draught, hinge, 'hinge-mechanism', { kind: 'joint', joint: hinge.joint }));
@@ -37,7 +39,7 @@ export function drawMechanism(draught: Draught): void {
 const speedAt = ({ turn, dx, dy }: Motion, { x, y }: Point): number => Math.hypot(dx - turn * y, dy + turn * x);
 
 /** From the rates that the hinges give to a movement that can be seen but is still small. */
-function drawnScale({ ring }: Draught, motions: readonly Motion[]): number {
+function drawnScale({ ring, mm }: Draught, motions: readonly Motion[]): number {
   let fastest = 0;
   let quickest = 0;
   ring.joints.forEach(({ intrados, extrados }, joint) => {
@@ -48,7 +50,8 @@ function drawnScale({ ring }: Draught, motions: readonly Motion[]): number {
   const { intrados, extrados } = ring.joints[0]!;
   const thickness = Math.hypot(extrados.x - intrados.x, extrados.y - intrados.y);
   if (fastest === 0) return 0;
-  return Math.min((LARGEST_MOVEMENT * thickness) / fastest, quickest === 0 ? Infinity : LARGEST_TURN / quickest);
+  const largest = Math.max(LARGEST_MOVEMENT.share * thickness, mm(LARGEST_MOVEMENT.least));
+  return Math.min(largest / fastest, quickest === 0 ? Infinity : LARGEST_TURN / quickest);
 }
 
 /** A turn by `angle` radians about `centre`, or a shift where the body does not turn. */
@@ -68,11 +71,10 @@ function moved(outline: Outline, movement: Movement): Outline {
   const turn = movement.kind === 'turn' ? movement.angle : 0;
   return {
     start: place(outline.start),
-    edges: outline.edges.map(
-      (edge): Edge =>
-        edge.kind === 'line'
-          ? { kind: 'line', to: place(edge.to) }
-          : { ...edge, to: place(edge.to), centre: place(edge.centre), from: edge.from + turn },
+    edges: outline.edges.map((edge): Edge =>
+      edge.kind === 'line'
+        ? { kind: 'line', to: place(edge.to) }
+        : { ...edge, to: place(edge.to), centre: place(edge.centre), from: edge.from + turn },
     ),
   };
 }

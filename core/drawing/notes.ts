@@ -1,7 +1,7 @@
 /** Quiet lettering on the elevation: joint numbers and what the wall or fill is. Left out where there is no room. */
 import type { Hinge } from '../assess/assessment.ts';
 import { put, type Draught } from './draught.ts';
-import { figure } from '../quantity/figures.ts';
+import { entered } from './entered.ts';
 import { along, lettering } from './path.ts';
 import type { Placing } from './places.ts';
 import { CAPITAL_HEIGHT, textWidth } from './text.ts';
@@ -22,7 +22,10 @@ function drawBreadth(draught: Draught): void {
   const left = ring.joints[0]!.intrados;
   const right = ring.joints.at(-1)!.intrados;
   const at = { x: (left.x + right.x) / 2, y: Math.min(left.y, right.y) - mm(15.5) };
-  const text = lettering(`breadth ${length(resolved.breadth)}`, at, { align: 'middle', about: { kind: 'field', path: 'breadth' } });
+  const text = lettering(`breadth ${length(resolved.breadth)}`, at, {
+    align: 'middle',
+    about: { kind: 'field', path: 'breadth' },
+  });
   const placed = places.placeSurely([[text]], at);
   put(draught, 'dimensions', ...placed.texts);
 }
@@ -31,7 +34,7 @@ function drawAboveNote(draught: Draught): void {
   const { resolved, sky, top, mm, places } = draught;
   const { kind, unitWeight } = resolved.above;
   if (kind === 'none') return;
-  const words = `${kind} above, ${figure(unitWeight)} kN/m³`;
+  const words = `${kind} above, ${entered(unitWeight)} kN/m³`;
   const width = mm(textWidth(words, 2.5) + 4);
   if (width > sky.right.x - sky.left.x) return;
   const placings: Placing[] = [];
@@ -56,10 +59,17 @@ function drawJointNumbers(draught: Draught): void {
     const { intrados, extrados } = ring.joints[joint]!;
     const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
     const number = (centre: { x: number; y: number }): Placing => [
-      lettering(String(joint), { x: centre.x, y: centre.y - mm(LETTERS / 2) }, { height: LETTERS, align: 'middle', role: 'text-quiet', about: { kind: 'joint', joint } }),
+      lettering(
+        String(joint),
+        { x: centre.x, y: centre.y - mm(LETTERS / 2) },
+        { height: LETTERS, align: 'middle', role: 'text-quiet', about: { kind: 'joint', joint } },
+      ),
     ];
     const away = mm(FROM_FACE + textWidth(String(joint), LETTERS) / 2 - LETTERS * CAPITAL_HEIGHT * 0.3);
-    const placings = [number(along(intrados, outwards, -away)), number(along(extrados, outwards, away))];
+    const placings = [0, 0.6, -0.6, 1.1, -1.1].flatMap((aside) => [
+      number(along(intrados, outwards + aside, -away)),
+      number(along(extrados, outwards + aside, away)),
+    ]);
     put(draught, 'notes', ...(places.place(placings) ?? []));
   }
 }

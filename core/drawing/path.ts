@@ -25,7 +25,8 @@ export function outlined(role: Role, outline: Outline, about?: About): PathItem 
 }
 
 /** A straight line between two points. */
-export const stroke = (role: Role, from: Point, to: Point, about?: About): PathItem => polyline(role, [from, to], about);
+export const stroke = (role: Role, from: Point, to: Point, about?: About): PathItem =>
+  polyline(role, [from, to], about);
 
 export function circle(role: Role, centre: Point, radius: number, about?: About): PathItem {
   const left = { x: centre.x - radius, y: centre.y };
@@ -59,9 +60,10 @@ export function along(point: Point, angle: number, length: number, aside = 0): P
   return { x: point.x + length * cos - aside * sin, y: point.y + length * sin + aside * cos };
 }
 
-/** An arrowhead with its point at `tip`, pointing in the direction `angle`; three times as long as wide. */
-export function arrowhead(role: Role, tip: Point, angle: number, length: number, about?: About): PathItem {
-  return polygon(role, [tip, along(tip, angle, -length, length / 6), along(tip, angle, -length, -length / 6)], about);
+/** An arrowhead with its point at `tip`, pointing in the direction `angle`; `slender` times as long as it is wide. */
+export function arrowhead(role: Role, tip: Point, angle: number, length: number, about?: About, slender = 3): PathItem {
+  const half = length / (2 * slender);
+  return polygon(role, [tip, along(tip, angle, -length, half), along(tip, angle, -length, -half)], about);
 }
 
 export interface LetteringStyle {

@@ -3,13 +3,16 @@
  * the first one that touches nothing is taken. What is drawn is kept as convex figures; two of them are apart when
  * some edge of either has the other wholly beyond it (the separating axis of convex figures).
  */
+import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
-import { boxOf, pathPoints, textCorners, type Box } from './extent.ts';
+import { boxOf, textCorners, type Box } from './extent.ts';
 import { along, stroke } from './path.ts';
 import type { PathItem, TextItem } from './scene.ts';
 
 /** Least distance between lettering and anything else, paper mm. */
 const CLEARANCE = 0.6;
+
+type ArcEdge = Extract<Edge, { kind: 'arc' }>;
 
 interface Taken {
   readonly corners: readonly Point[];
@@ -43,8 +46,7 @@ export class Places {
   blockPath(path: PathItem): void {
     let from = path.start;
     for (const edge of path.edges) {
-      const points = edge.kind === 'line' ? [edge.to] : pathPoints({ start: from, edges: [edge] }).slice(1);
-      for (const to of points) {
+      for (const to of edge.kind === 'line' ? [edge.to] : chordsOf(edge)) {
         this.block([from, to]);
         from = to;
       }
@@ -80,7 +82,9 @@ export class Places {
         const end = along(from, direction, (ring * RING_STEP) / this.millimetresPerUnit);
         const texts = this.hungFrom(first, end, Math.cos(direction) >= 0);
         const leader = stroke('leader', from, end);
-        const crossed = ring < RINGS_WITH_CLEAR_LEADER && this.taken.some((other) => other.lettering && !apart([from, end], other.corners, 0));
+        const crossed =
+          ring < RINGS_WITH_CLEAR_LEADER &&
+          this.taken.some((other) => other.lettering && !apart([from, end], other.corners, 0));
         if (crossed || !this.isFree(texts)) continue;
         texts.forEach((text) => this.blockText(text));
         this.blockPath(leader);
@@ -94,7 +98,9 @@ export class Places {
     return placing.every((text) => {
       const corners = textCorners(text, this.millimetresPerUnit);
       const box = boxOf(corners) as Box;
-      return this.taken.every((other) => boxesApart(box, other.box, this.clearance) || apart(corners, other.corners, this.clearance));
+      return this.taken.every(
+        (other) => boxesApart(box, other.box, this.clearance) || apart(corners, other.corners, this.clearance),
+      );
     });
   }
 
@@ -119,16 +125,29 @@ export class Places {
   }
 }
 
+/** Chords of an arc that turn no more than this, radians, lie close enough to it for lettering. */
+const CHORD_TURN = 0.1;
+
+function chordsOf({ centre, radius, from, turn }: ArcEdge): Point[] {
+  const count = Math.ceil(Math.abs(turn) / CHORD_TURN);
+  return Array.from({ length: count }, (_, i) => along(centre, from + (turn * (i + 1)) / count, radius));
+}
+
 /** Paper mm from one ring of tries to the next. */
 const RING_STEP = 6;
 /** Rings within which a leader may not cross other lettering; beyond, a crossed label is better than none. */
 const RINGS_WITH_CLEAR_LEADER = 60;
 const RINGS = 400;
 /** Down and to the sides first: the space over an arch belongs to its loads. */
-const DIRECTIONS = [-45, -135, -20, -160, 20, 160, 45, 135, -70, -110, 70, 110].map((degrees) => (degrees * Math.PI) / 180);
+const DIRECTIONS = [-45, -135, -20, -160, 20, 160, 45, 135, -70, -110, 70, 110].map(
+  (degrees) => (degrees * Math.PI) / 180,
+);
 
 const boxesApart = (a: Box, b: Box, clearance: number): boolean =>
-  a.left >= b.right + clearance || b.left >= a.right + clearance || a.bottom >= b.top + clearance || b.bottom >= a.top + clearance;
+  a.left >= b.right + clearance ||
+  b.left >= a.right + clearance ||
+  a.bottom >= b.top + clearance ||
+  b.bottom >= a.top + clearance;
 
 /** Whether two convex figures are at least `clearance` apart; segments count as figures of two corners. */
 export function apart(a: readonly Point[], b: readonly Point[], clearance: number): boolean {

@@ -9,7 +9,7 @@ import type { About } from './scene.ts';
 
 /** Paper mm. */
 const LENGTH = 15;
-const HEAD = 3;
+const HEAD = 3.6;
 const LINE = 4;
 
 export function drawReactions(draught: Draught): void {
@@ -29,7 +29,7 @@ function drawReaction(draught: Draught, side: 'left' | 'right', reaction: Reacti
   const tip = { x, y };
   const tail = along(tip, angle, -mm(LENGTH));
   const shaft = stroke('reaction', tail, along(tip, angle, -mm(HEAD)), about);
-  put(draught, 'reactions', shaft, arrowhead('reaction-head', tip, angle, mm(HEAD), about));
+  put(draught, 'reactions', shaft, arrowhead('reaction-head', tip, angle, mm(HEAD), about, 1.8));
   places.blockPath(stroke('reaction', tail, tip));
   const placed = places.placeSurely(figuresAt(draught, reaction, tail, inwards, about), tail);
   put(draught, 'reactions', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
@@ -41,7 +41,11 @@ function figuresAt({ mm }: Draught, reaction: Reaction, tail: Point, inwards: 1 
   const align = inwards === 1 ? 'end' : 'start';
   const at = (dx: number, dy: number): Placing =>
     lines.map((text, i) =>
-      lettering(text, { x: tail.x + mm(-inwards * dx), y: tail.y + mm(dy - i * LINE) }, { align, about, role: 'text-force' }),
+      lettering(
+        text,
+        { x: tail.x + mm(-inwards * dx), y: tail.y + mm(dy - i * LINE) },
+        { align, about, role: 'text-force' },
+      ),
     );
   return [at(1.5, 0.7), at(1.5, -2.5), at(-8, -4.5), at(1.5, 6), at(4, -6)];
 }

@@ -84,6 +84,12 @@ export interface Layer {
   readonly items: readonly SceneItem[];
 }
 
+/** What a numbered mark on the drawing stands for. */
+export interface KeyEntry {
+  readonly mark: string;
+  readonly meaning: string;
+}
+
 export interface Scene {
   readonly title: string;
   readonly description: string;
@@ -92,6 +98,8 @@ export interface Scene {
   readonly layers: readonly Layer[];
   /** Round everything drawn, lettering included; null when nothing is. */
   readonly bounds: Box | null;
+  /** Explains marks that stand in for longer lettering; empty where everything is lettered in place. */
+  readonly key: readonly KeyEntry[];
 }
 
 /** Gathers items by layer. Kept apart from `Scene` so that a scene, once made, does not change. */
@@ -103,12 +111,19 @@ export function addItems(items: Items, layer: LayerName, ...added: readonly Scen
   else for (const item of added) list.push(item);
 }
 
-export function makeScene(head: Pick<Scene, 'title' | 'description' | 'millimetresPerUnit'>, items: Items): Scene {
+type SceneHead = Pick<Scene, 'title' | 'description' | 'millimetresPerUnit'>;
+
+export function makeScene(head: SceneHead, items: Items, key: readonly KeyEntry[] = []): Scene {
   const layers = LAYERS.flatMap((name) => {
     const list = items.get(name) ?? [];
     return list.length === 0 ? [] : [{ name, items: list }];
   });
-  return { ...head, layers, bounds: boxOf(layers.flatMap((layer) => layer.items.flatMap((item) => itemPoints(item, head.millimetresPerUnit)))) };
+  return {
+    ...head,
+    layers,
+    key,
+    bounds: boxOf(layers.flatMap((layer) => layer.items.flatMap((item) => itemPoints(item, head.millimetresPerUnit)))),
+  };
 }
 
 /** Points whose box is the item's box. */

@@ -153,7 +153,9 @@ export function drawnStyle(role: Role, theme: Theme): DrawnStyle {
 }
 
 /** Font weight and slope by the words that SVG, CSS and most libraries use. */
-export const FACES: Readonly<Record<Face, { readonly weight: 'normal' | 'bold'; readonly slope: 'normal' | 'oblique' }>> = {
+export const FACES: Readonly<
+  Record<Face, { readonly weight: 'normal' | 'bold'; readonly slope: 'normal' | 'oblique' }>
+> = {
   regular: { weight: 'normal', slope: 'normal' },
   bold: { weight: 'bold', slope: 'normal' },
   oblique: { weight: 'normal', slope: 'oblique' },

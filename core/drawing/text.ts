@@ -10,7 +10,7 @@ export type Face = 'regular' | 'bold' | 'oblique';
 export const CAPITAL_HEIGHT = 0.729;
 /** How far the ink of ordinary text reaches over and under the baseline, as shares of the em: bars and brackets. */
 export const ASCENT = 0.77;
-export const DESCENT = 0.24;
+const DESCENT = 0.24;
 /** Characters that the font lacks are taken as wide as an em: ideographs are, and most others are narrower. */
 const FALLBACK_WIDTH = 1;
 
@@ -46,6 +46,12 @@ export function textWidth(text: string, height: number, face: Face = 'regular'):
 }
 
 const COMBINING = /^\p{Mn}$/u;
+
+/** Figures stand on the line. */
+const STANDING = /^[\d.−\s]*$/u;
+
+/** How far the ink of this text reaches below its baseline, as a share of the em. */
+export const descentOf = (text: string): number => (STANDING.test(text) ? 0.02 : DESCENT);
 
 /** The characters of a text that the program's own font cannot show, each once; another font will stand in for them. */
 export function charactersNotInFont(text: string): string[] {

@@ -92,8 +92,11 @@ export function drawHinge(draught: Draught, hinge: Hinge, role: HingeRole, about
   const across = Math.atan2(opening.y - contact.y, opening.x - contact.x);
   const { mm } = draught;
   const half = Math.min(mm(OPENING.most), Math.max(mm(OPENING.least), OPENING.share * length)) / 2;
-  return [
-    polygon(role, [contact, along(contact, across, length, half), along(contact, across, length, -half)], about),
-    circle(role, contact, mm(CONTACT), about),
+  const corners: [Point, Point, Point] = [
+    contact,
+    along(contact, across, length, half),
+    along(contact, across, length, -half),
   ];
+  draught.places.block(corners);
+  return [polygon(role, corners, about), circle(role, contact, mm(CONTACT), about)];
 }

@@ -1,0 +1,82 @@
+/** The findings beside the elevation: what follows from it in figures, the checks, and what it was computed from. */
+import type { AssessedScheme } from '../assess/assess.ts';
+import type { SchemeAssessment } from '../assess/assessment.ts';
+import type { ResolvedScheme } from '../job/defaults.ts';
+import { figure } from '../quantity/figures.ts';
+import type { Column } from './column.ts';
+import type { LengthText } from './draught.ts';
+import { entered } from './entered.ts';
+import { lettering } from './path.ts';
+import { STATUS_ROLES, statusMark } from './status.ts';
+import { cutToWidth, plainText, textWidth } from './text.ts';
+
+export function drawKeyFigures(column: Column, { result, resolved }: AssessedScheme, length: LengthText): void {
+  column.heading('figures', 'Figures');
+  for (const [name, value] of findings(result, resolved)) column.row('figures', name, value);
+  column.space(1.5);
+  for (const [name, value] of given(resolved, length)) column.row('figures', name, value);
+}
+
+type Row = readonly [name: string, value: string];
+
+function findings(result: SchemeAssessment, { asked }: ResolvedScheme): Row[] {
+  const { thrust, reactions, geometricSafety, crown } = result;
+  const rows: Row[] = [];
+  if (geometricSafety !== null) {
+    rows.push(['Geometric safety', `${figure(geometricSafety)} (${entered(asked.geometricSafety)} asked for)`]);
+  }
+  if (thrust.least?.horizontal != null) rows.push(['Least thrust', kilonewtons(thrust.least.horizontal)]);
+  if (thrust.stands) {
+    const greatest = thrust.greatest?.horizontal;
+    rows.push(['Greatest thrust', greatest == null ? 'no limit' : kilonewtons(greatest)]);
+  }
+  if (reactions !== null) {
+    rows.push(['Vertical, left', kilonewtons(reactions.left.vertical)]);
+    rows.push(['Vertical, right', kilonewtons(reactions.right.vertical)]);
+  }
+  if (crown !== null) rows.push(['Crown balance, mid-ring', kilonewtons(crown.horizontal)]);
+  return rows;
+}
+
+function given({ ring, masonry, above, breadth, sway }: ResolvedScheme, length: LengthText): Row[] {
+  const rows: Row[] = [
+    ['Ring', `${ring.voussoirs} voussoirs, ${ring.joints} joints`],
+    ['Thickness and breadth', `${length(ring.thickness)} and ${length(breadth)} m`],
+    ['Masonry', `${masonry.name}, ${entered(masonry.unitWeight)} kN/m³`],
+  ];
+  if (above.kind === 'none') rows.push(['Above', 'nothing']);
+  else rows.push(['Above', `${above.kind} ${length(above.height)} m, ${entered(above.unitWeight)} kN/m³`]);
+  if (sway !== 0) rows.push(['Sideways', `${entered(sway)} of gravity`]);
+  return rows;
+}
+
+const kilonewtons = (value: number): string => `${figure(value)} kN`;
+
+/** Each check with its mark and its word, and the reason in small lettering where there is room for it. */
+export function drawChecks(column: Column, { checks }: SchemeAssessment): void {
+  column.heading('figures', 'Checks');
+  for (const [i, { title, status, because }] of checks.entries()) {
+    if (column.room < 2 * CHECK_ROW && i < checks.length - 1) {
+      column.paragraph('figures', `and ${checks.length - i} more`, { height: 1.8, role: 'text-quiet' });
+      return;
+    }
+    const centre = { x: column.left + 1.6, y: column.top - 1.9 };
+    column.put('figures', ...statusMark(status, centre, 2.6));
+    const word = lettering(
+      status,
+      { x: column.left + column.width, y: column.top - 3.1 },
+      { height: 2.5, role: STATUS_ROLES[status], align: 'end' },
+    );
+    const room = column.width - INDENT - textWidth(status, 2.5) - 2;
+    const name = lettering(cutToWidth(plainText(title), room, 2.5), { x: column.left + INDENT, y: column.top - 3.1 });
+    column.put('figures', word, name);
+    column.space(CHECK_ROW);
+    if (column.room > CHECK_ROW * (checks.length - i))
+      column.paragraph('figures', because, { height: 1.8, role: 'text-quiet' }, INDENT);
+    column.space(0.6);
+  }
+}
+
+/** mm */
+const CHECK_ROW = 4.4;
+const INDENT = 5;
