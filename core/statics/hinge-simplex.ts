@@ -87,7 +87,8 @@ function search(rows: Rows, c: readonly number[], box: number): { answer: Simple
       y[i] = yi;
     }
     const entering = mostViolated(rows, s);
-    if (entering < 0) return settled(rows, basis, matrix, right, inverse, s, y, c);
+    // a row of the basis holds exactly but for rounding; when it is the worst, nothing is left to exchange
+    if (entering < 0 || basis.includes(entering)) return settled(rows, basis, matrix, right, inverse, s, y, c);
     let largest = 0;
     for (let i = 0; i < d; i++) {
       let wi = 0;

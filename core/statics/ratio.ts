@@ -72,6 +72,15 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
   return best;
 }
 
+/**
+ * The least slack z with ±p + q + z w ≥ 0 at every joint: not positive where a state of ratio one or less exists,
+ * −∞ where it falls without end.
+ */
+export function leastSlack(p: JointForms, q: JointForms, weights: Float64Array): number {
+  const outcome = minimise(slackRows(p, q, 1, weights), [0, 0, 0, 1]);
+  return outcome.kind === 'optimal' ? outcome.value : -Infinity;
+}
+
 /** The least ratio of a thrust so great that the loads do not count: the forms without their loads, the q summing to one. */
 function ratioAtEndlessThrust(p: JointForms, q: JointForms, weights: Float64Array, hard?: Rows): LeastRatio | null {
   const joints = q.b.length;
