@@ -104,7 +104,7 @@ class FakeSession {
 }
 
 export class FakeWindow extends EventEmitter {
-  readonly webContents: EventEmitter & Record<string, unknown>;
+  readonly webContents: EventEmitter;
   address = '';
   title = '';
   isClosed = false;
