@@ -1,5 +1,5 @@
 /** What must be said beside every result: always, and on account of what this arch shows. */
-import type { SchemeAssessment } from '../assess/assessment.ts';
+import type { Assumed } from '../job/assumed.ts';
 
 /** Printed on every sheet and shown in the program, in this order. */
 export const standingCautions: readonly string[] = [
@@ -15,13 +15,19 @@ export interface RaisedCaution {
   readonly text: string;
 }
 
+export interface CautionFacts {
+  readonly stands: boolean;
+  readonly geometricSafety: number | null;
+  readonly assumed: readonly Assumed[];
+}
+
 /** A line within the middle third at every joint has a geometric safety of three. */
 const MIDDLE_THIRD = 3;
 
 /** Cautions that an arch raises by itself; empty when it raises none. */
-export function raisedCautions({ thrust, geometricSafety, assumed }: SchemeAssessment): RaisedCaution[] {
+export function raisedCautions({ stands, geometricSafety, assumed }: CautionFacts): RaisedCaution[] {
   const raised: RaisedCaution[] = [];
-  if (!thrust.stands) {
+  if (!stands) {
     raised.push({
       id: 'does-not-stand',
       text: 'No line of thrust fits in this ring. If the arch is standing, something that is not in this model holds it up: keep clear of it and find out what.',

@@ -7,6 +7,8 @@ import { cutToWidth, plainText, textWidth, wrapText } from './text.ts';
 const LEADING = 1.75;
 
 export class Column {
+  /** Whether everything so far found room. */
+  complete = true;
   /** Where the next line's top is, mm from the bottom of the paper. */
   top: number;
 
@@ -86,6 +88,7 @@ export class Column {
       const last = i === texts.length - 1;
       const needed = paragraphHeight(text, this.width, how.height) + (last ? 0 : more);
       if (needed > this.room) {
+        this.complete = false;
         this.paragraph(layer, `and ${texts.length - i} more`, how);
         return;
       }

@@ -25,10 +25,11 @@ function findings(result: SchemeAssessment, { asked }: ResolvedScheme): Row[] {
   if (geometricSafety !== null) {
     rows.push(['Geometric safety', `${figure(geometricSafety)} (${entered(asked.geometricSafety)} asked for)`]);
   }
-  if (thrust.least?.horizontal != null) rows.push(['Least thrust', kilonewtons(thrust.least.horizontal)]);
+  const least = thrust.least?.horizontal ?? null;
+  if (least !== null) rows.push(['Least thrust', kilonewtons(least)]);
   if (thrust.stands) {
-    const greatest = thrust.greatest?.horizontal;
-    rows.push(['Greatest thrust', greatest == null ? 'no limit' : kilonewtons(greatest)]);
+    const greatest = thrust.greatest?.horizontal ?? null;
+    rows.push(['Greatest thrust', greatest === null ? 'no limit' : kilonewtons(greatest)]);
   }
   if (reactions !== null) {
     rows.push(['Vertical, left', kilonewtons(reactions.left.vertical)]);

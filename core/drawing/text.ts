@@ -55,8 +55,7 @@ export const descentOf = (text: string): number => (STANDING.test(text) ? 0.02 :
 
 /** The characters of a text that the program's own font cannot show, each once; another font will stand in for them. */
 export function charactersNotInFont(text: string): string[] {
-  const missing = [...text].filter((character) => !REGULAR.has(character.codePointAt(0) as number));
-  return [...new Set(missing)];
+  return [...new Set(Array.from(text))].filter((character) => !REGULAR.has(character.codePointAt(0) as number));
 }
 
 /** Control characters, marks that turn the direction of text, stray halves of pairs, line ends, non-characters. */

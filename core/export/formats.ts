@@ -1,11 +1,10 @@
-/** What can be made of an assessed job, by format. The command line and the app offer what stands in this table. */
-import { assessScheme, type AssessedScheme } from '../assess/assess.ts';
-import type { Assessment, SchemeAssessment } from '../assess/assessment.ts';
+/** What can be made of an assessed scheme, by format. The command line and the app offer what stands in this table. */
+import type { AssessedScheme } from '../assess/assess.ts';
 import { elevationSheet, type SheetOptions } from '../drawing/elevation-sheet.ts';
 import type { Job } from '../job/schema.ts';
 import { sheetToSvg, type SvgOptions } from './svg.ts';
 
-/** What the sheet says that is not in the job. Dates are given, never taken from a clock. */
+/** What a sheet says that is not in the job. Dates are given, never taken from a clock. */
 export interface ExportOptions extends SheetOptions, SvgOptions {
   readonly owner?: string;
   readonly drawnBy?: string;
@@ -13,59 +12,58 @@ export interface ExportOptions extends SheetOptions, SvgOptions {
   readonly issuedOn?: string;
 }
 
-export interface ExportFormat {
-  readonly id: FormatId;
-  readonly extension: string;
-  readonly mime: string;
-  /**
-   * One scheme of the job, by its place in `assessment.schemes`.
-   * @throws RangeError when there is no such scheme.
-   */
-  make(job: Job, assessment: Assessment, scheme: number, options?: ExportOptions): string;
+/** One scheme of a job with its answers. */
+export interface ExportSubject {
+  readonly job: Job;
+  readonly assessed: AssessedScheme;
 }
 
-export type FormatId = 'svg';
+export interface ExportFormat {
+  /** File name ending without its point. */
+  readonly extension: string;
+  readonly mime: string;
+  /** Text, to be written as UTF-8, or bytes; the same subject and options always give the same. */
+  readonly make: (subject: ExportSubject, options?: ExportOptions) => string | Uint8Array;
+}
 
-export const FORMATS: Readonly<Record<FormatId, ExportFormat>> = {
-  svg: { id: 'svg', extension: 'svg', mime: 'image/svg+xml', make: elevationSvg },
-};
+export const FORMATS = {
+  svg: { extension: 'svg', mime: 'image/svg+xml', make: elevationSvg },
+} as const satisfies Readonly<Record<string, ExportFormat>>;
 
-function elevationSvg(job: Job, assessment: Assessment, scheme: number, options: ExportOptions = {}): string {
-  const assessed = assessedAgain(job, assessment, scheme);
+export type FormatId = keyof typeof FORMATS;
+
+function elevationSvg(subject: ExportSubject, options: ExportOptions = {}): string {
+  const sheet = elevationSheet(subject.assessed, sheetTitle(subject, options), options);
+  return sheetToSvg(sheet, options);
+}
+
+function sheetTitle({ job, assessed }: ExportSubject, options: ExportOptions) {
   const { site = {} } = job;
-  const title = {
+  const { arch, scheme, name } = assessed.result;
+  const schemes = job.arches.flatMap((each) => each.schemes.map(({ id }) => ({ arch: each.id, scheme: id })));
+  const index = schemes.findIndex((each) => each.arch === arch && each.scheme === scheme);
+  return {
     owner: options.owner ?? '',
     number: site.reference ?? '',
     title: job.title ?? '',
-    subtitle: assessed.result.name,
+    subtitle: [name, site.place ?? ''].filter((text) => text !== '').join(', '),
     createdBy: options.drawnBy ?? '',
     approvedBy: options.approvedBy ?? '',
     issuedOn: options.issuedOn ?? '',
-    sheet: `${scheme + 1} of ${assessment.schemes.length}`,
+    sheet: `${index + 1} of ${schemes.length}`,
     surveyedBy: site.surveyedBy ?? '',
     surveyedOn: site.surveyedOn ?? '',
   };
-  return sheetToSvg(elevationSheet(assessed, title, options), options);
-}
-
-/** The assessment document carries no outlines, so the ring is built again: a millisecond, and the same figures. */
-function assessedAgain(job: Job, assessment: Assessment, index: number): AssessedScheme {
-  const wanted = assessment.schemes[index];
-  const arch = job.arches.find(({ id }) => id === wanted?.arch);
-  const scheme = arch?.schemes.find(({ id }) => id === wanted?.scheme);
-  const outcome = arch === undefined || scheme === undefined ? null : assessScheme(arch, scheme);
-  if (outcome === null || !outcome.ok) throw new RangeError(`no assessed scheme ${index} in this job`);
-  return outcome.assessed;
 }
 
 const LONGEST_STEM = 80;
 
-/** A file name without extension for one scheme's elevation: letters and figures of its name, parted by hyphens. */
-export function elevationFileStem({ name }: SchemeAssessment): string {
-  const words =
-    name
-      .normalize('NFKC')
-      .toLowerCase()
-      .match(/[\p{L}\p{N}]+/gu) ?? [];
-  return ['elevation', ...words].join('-').slice(0, LONGEST_STEM);
+/** A file name without its ending for one scheme: plain letters, digits and hyphens of its name. */
+export function exportFileStem({ result }: AssessedScheme): string {
+  const plain = result.name
+    .normalize('NFKD')
+    .replace(/\p{Mn}/gu, '')
+    .toLowerCase()
+    .match(/[a-z0-9]+/g);
+  return [...(plain ?? ['arch']), 'elevation'].join('-').slice(-LONGEST_STEM);
 }
