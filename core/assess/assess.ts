@@ -2,24 +2,28 @@
  * The assessment of a scheme and of a job: pure and synchronous, well under a frame for any ring on a drawing.
  * The desktop, the browser and the command line all come through here.
  */
+import type { Check } from '../checks/check.ts';
 import { compressionOnly } from '../checks/compression-only.ts';
-import { distance, type Point } from '../geometry/point.ts';
-import { buildRing, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import { crushing, sliding } from '../checks/joint-limits.ts';
+import { distance } from '../geometry/point.ts';
+import type { RingGeometry } from '../geometry/ring.ts';
 import type { Assumed } from '../job/assumed.ts';
 import { resolveScheme, type ResolvedScheme } from '../job/defaults.ts';
 import { ProblemError, underPath, type Problem } from '../job/problem.ts';
 import type { Arch, Job, Scheme } from '../job/schema.ts';
-import type { Block } from '../loading/forces.ts';
 import { loadRing } from '../loading/load-ring.ts';
 import { crownBalance } from '../statics/crown-balance.ts';
 import { leastMiddleShare, type MiddleShare } from '../statics/geometric-safety.ts';
-import type { Hinge } from '../statics/hinge.ts';
 import { lineOfThrust } from '../statics/line.ts';
-import { motionsOf, thrustByVirtualWork, workOf } from '../statics/mechanism.ts';
-import { equilibriumResidual, type SpringingForce } from '../statics/proof.ts';
-import { ringSystem, type RingSystem } from '../statics/system.ts';
-import { thrustRange, type Extreme, type ThrustAnswer, type TurningHinge } from '../statics/thrust.ts';
-import type { Assessment, Mechanism, Proof, SchemeAssessment, Thrust, ThrustState } from './assessment.ts';
+import { neededStrength } from '../statics/needed-strength.ts';
+import { neededFriction } from '../statics/sliding.ts';
+import { thinnestRing } from '../statics/thinnest-ring.ts';
+import { thrustRange, type ThrustAnswer } from '../statics/thrust.ts';
+import { usableThrust } from '../statics/usable-thrust.ts';
+import type { Assessment, SchemeAssessment } from './assessment.ts';
+import { buildScheme, withThickness, type BuiltScheme } from './build.ts';
+import { loadFactors, swayCapacity } from './multiples.ts';
+import { printedMechanism, printedProof, printedReaction, printedThrust, springingForces } from './printed.ts';
 
 /** A scheme with everything that was built to assess it, for the board and the drawings. */
 export interface AssessedScheme {
@@ -55,138 +59,85 @@ export function assessJob(job: Job): JobOutcome {
 export function assessScheme(arch: Arch, scheme: Scheme): SchemeOutcome {
   const { resolved, assumed } = resolveScheme(scheme, Math.max(0, arch.schemes.indexOf(scheme)));
   try {
-    return { ok: true, assessed: assess(arch, resolved, assumed) };
+    const built = buildScheme(resolved);
+    return { ok: true, assessed: { resolved, ring: built.ring, result: assess(arch, built, assumed) } };
   } catch (error) {
     if (error instanceof ProblemError) return { ok: false, problems: error.problems };
     throw error;
   }
 }
 
-function assess(arch: Arch, resolved: ResolvedScheme, assumed: readonly Assumed[]): AssessedScheme {
-  const form = ringForm(resolved);
-  const ring = buildRing(form);
-  const blocks = loadRing(ring, resolved);
-  const system = ringSystem(ring.joints, blocks);
+function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): SchemeAssessment {
+  const { resolved, ring, blocks, system } = built;
+  const { masonry, breadth } = resolved;
   const answer = thrustRange(system);
+  const { stands } = answer;
   const middle = leastMiddleShare(system);
-  const stands = answer.stands;
   const least = stands ? answer.least : null;
   const line = least === null ? [] : lineOfThrust(system, ring.joints, least.state);
   const springings = least === null ? null : springingForces(system, least, line);
-  const result: SchemeAssessment = {
+  return {
     arch: arch.id,
     scheme: resolved.id,
     name: `${arch.name ?? arch.id} / ${resolved.name}`,
     assumed,
     model: { joints: ring.joints.map(({ intrados, extrados }) => ({ intrados, extrados })), blocks },
     crown: crownBalance(ring, system, (split) => loadRing(split, resolved)),
-    thrust: printedThrust(system, ring, answer, line),
-    reactions: springings === null ? null : { left: printedReaction(springings.left), right: printedReaction(springings.right) },
+    thrust: printedThrust(
+      system,
+      ring,
+      answer,
+      line,
+      stands ? usableThrust(system, { friction: masonry.friction, strength: masonry.strength, breadth }) : null,
+    ),
+    reactions:
+      springings === null
+        ? null
+        : { left: printedReaction(springings.left), right: printedReaction(springings.right) },
     geometricSafety: stands && middle !== null && middle.share > 0 ? 1 / middle.share : null,
+    thinnestRing: thinnest(built, middle),
+    loadFactors: loadFactors(built),
+    swayCapacity: swayCapacity(built),
     ...(stands ? {} : { mechanism: printedMechanism(ring, blocks, answer.mechanism) }),
-    checks: [compressionCheck(ring, answer, middle, resolved.asked.geometricSafety)],
-    proof: proofOf(ring, system, blocks, least, line, springings),
-  };
-  return { resolved, ring, result };
-}
-
-function ringForm({ profile, ring }: ResolvedScheme): RingForm {
-  return {
-    profile,
-    thickness: { crown: ring.thickness, springing: ring.thickness },
-    voussoirs: ring.voussoirs,
-    joints: ring.joints,
+    checks: checksOf(built, answer, middle),
+    proof: printedProof(ring, system, blocks, least, line, springings),
   };
 }
 
-const plainHinges = (hinges: readonly TurningHinge[]): Hinge[] => hinges.map(({ joint, side }) => ({ joint, side }));
-
-const printedPoint = (point: Point | null) => point ?? { x: null, y: null };
-
-function printedThrust(
-  system: RingSystem,
-  ring: RingGeometry,
-  answer: ThrustAnswer,
-  leastLine: readonly (Point | null)[],
-): Thrust {
-  if (!answer.stands) return { stands: false, least: null, greatest: null };
-  const printed = (extreme: Extreme | null, line: readonly (Point | null)[]): ThrustState | null =>
-    extreme && { horizontal: extreme.horizontal, line: line.map(printedPoint), hinges: plainHinges(extreme.hinges) };
-  return {
-    stands: true,
-    least: printed(answer.least, leastLine),
-    greatest: printed(answer.greatest, answer.greatest ? lineOfThrust(system, ring.joints, answer.greatest.state) : []),
-  };
-}
-
-function springingForces(
-  system: RingSystem,
-  { state }: Extreme,
-  line: readonly (Point | null)[],
-): { left: SpringingForce; right: SpringingForce } {
-  const last = system.joints - 1;
-  const { force } = system.frame;
-  const horizontal = state[0] as number;
-  const vertical = state[1] as number;
-  return {
-    left: { horizontal: horizontal * force, vertical: vertical * force, at: line[0] ?? null },
-    right: {
-      horizontal: (horizontal + (system.sums.fx[last] as number)) * force,
-      vertical: -(vertical + (system.sums.fy[last] as number)) * force,
-      at: line[last] ?? null,
-    },
-  };
-}
-
-const printedReaction = ({ horizontal, vertical, at }: SpringingForce) => ({
-  horizontal,
-  vertical,
-  x: at?.x ?? null,
-  y: at?.y ?? null,
-});
-
-function printedMechanism(ring: RingGeometry, blocks: readonly Block[], hinges: readonly TurningHinge[]): Mechanism {
-  return { hinges, work: workOf(blocks, motionsOf(ring.joints, hinges)) };
-}
-
-function compressionCheck(
-  ring: RingGeometry,
-  answer: ThrustAnswer,
-  middle: MiddleShare | null,
-  askedSafety: number,
-) {
+function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare | null): Check[] {
+  const { resolved, ring, system } = built;
+  const { masonry, breadth, asked } = resolved;
   const hinges = answer.stands ? (middle?.touches ?? []) : answer.mechanism;
   const joints = [...new Set(hinges.map(({ joint }) => joint))];
   const governing = ring.joints[joints[0] ?? 0];
-  return compressionOnly({
-    stands: answer.stands,
-    thickness: governing ? distance(governing.intrados, governing.extrados) : 0,
-    share: middle?.share ?? null,
-    endlessThrust: middle !== null && middle.state === null,
-    joints,
-    askedSafety,
-  });
+  const inside = answer.stands ? (middle?.state ?? null) : null;
+  return [
+    compressionOnly({
+      stands: answer.stands,
+      thickness: governing ? distance(governing.intrados, governing.extrados) : 0,
+      share: middle?.share ?? null,
+      endlessThrust: middle !== null && middle.state === null,
+      joints,
+      askedSafety: asked.geometricSafety,
+    }),
+    sliding(masonry.friction, answer.stands ? neededFriction(system) : null),
+    crushing(masonry.strength, inside === null ? null : neededStrength(system, inside, breadth)),
+  ];
 }
 
-function proofOf(
-  ring: RingGeometry,
-  system: RingSystem,
-  blocks: readonly Block[],
-  least: Extreme | null,
-  line: readonly (Point | null)[],
-  springings: { left: SpringingForce; right: SpringingForce } | null,
-): Proof {
-  if (least === null || springings === null) {
-    return { equilibriumResidual: null, static: null, kinematic: null, gap: null };
+/** Rings are searched up to this share of the span: thicker than any that was ever turned. */
+const THICKEST_OF_SPAN = 0.5;
+
+function thinnest({ resolved, ring, system }: BuiltScheme, middle: MiddleShare | null): number | null {
+  const { thickness } = resolved.ring;
+  const joints = ring.joints;
+  const width = Math.abs((joints[joints.length - 1]?.intrados.x ?? 0) - (joints[0]?.intrados.x ?? 0));
+  const systemFor = (trial: number) => buildScheme(withThickness(resolved, trial)).system;
+  try {
+    return thinnestRing(systemFor, { thickness, system, middle }, Math.max(thickness, THICKEST_OF_SPAN * width));
+  } catch (error) {
+    // a trial ring too thick for its curvature, or so thin that a load stands beside it, ends the search without an answer
+    if (error instanceof ProblemError) return null;
+    throw error;
   }
-  const kinematic = thrustByVirtualWork(ring.joints, blocks, least.hinges);
-  return {
-    equilibriumResidual: equilibriumResidual(blocks, line, springings.left, springings.right),
-    static: least.horizontal,
-    kinematic,
-    gap:
-      kinematic === null
-        ? null
-        : Math.abs(least.horizontal - kinematic) / Math.max(Math.abs(least.horizontal), system.frame.force),
-  };
 }
