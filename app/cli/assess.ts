@@ -1,12 +1,13 @@
 import { join, resolve } from 'node:path';
 import { assessJob } from '../../core/assess/assess.ts';
 import type { Assessment } from '../../core/assess/assessment.ts';
+import type { FormatId } from '../../core/export/formats.ts';
 import { readJobFile } from '../../core/job/archive.ts';
 import { problemSentence } from '../../core/job/problem.ts';
 import type { Job } from '../../core/job/schema.ts';
 import { readStreamWithin, readWithin } from '../files/read.ts';
 import { saveWholeInFolder } from '../files/save.ts';
-import { drawingsOf, type Drawing, type Format } from './formats.ts';
+import { drawingsOf, type Drawing } from './formats.ts';
 import { fileNames } from './names.ts';
 import type { Options } from './options.ts';
 import { summary } from './summary.ts';
@@ -86,7 +87,7 @@ async function assessFile(file: string, { folder, input }: Terminal): Promise<As
 
 type Drawn = ({ readonly ok: true } & Drawing) | { readonly ok: false; readonly problem: string };
 
-function drawn(job: Job, formats: readonly Format[]): Drawn[] {
+function drawn(job: Job, formats: readonly FormatId[]): Drawn[] {
   return formats.flatMap((format): Drawn[] => {
     try {
       return drawingsOf(job, format).map((drawing) => ({ ok: true, ...drawing }));

@@ -1,5 +1,6 @@
 import { parseArgs } from 'node:util';
-import { FORMAT_NAMES, isFormat, type Format } from './formats.ts';
+import type { FormatId } from '../../core/export/formats.ts';
+import { FORMAT_NAMES, isFormat } from './formats.ts';
 
 export interface Options {
   readonly files: readonly string[];
@@ -7,7 +8,7 @@ export interface Options {
   readonly strict: boolean;
   /** Null: write no drawings. */
   readonly out: string | null;
-  readonly formats: readonly Format[];
+  readonly formats: readonly FormatId[];
 }
 
 /** What was asked: to assess, to be told something, or something that cannot be done. */

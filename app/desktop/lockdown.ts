@@ -8,7 +8,7 @@ export const PAGE_ORIGIN = `${PAGE_SCHEME}://skewback`;
 const INSIDE = new Set([`${PAGE_SCHEME}:`, 'blob:', 'data:', 'devtools:']);
 
 /** Whether a request stays within the program. */
-export function staysInside(url: string): boolean {
+function staysInside(url: string): boolean {
   return URL.canParse(url) && INSIDE.has(new URL(url).protocol);
 }
 
