@@ -1,0 +1,181 @@
+/** What the board shows of the session: the place on the screen, the drawing at that scale, and what can be taken hold of. */
+import type { Joint } from '../../core/assess/assessment.ts';
+import { elevation } from '../../core/drawing/elevation.ts';
+import type { About, Scene } from '../../core/drawing/scene.ts';
+import type { Theme } from '../../core/drawing/style.ts';
+import { textCorners } from '../../core/drawing/extent.ts';
+import type { Point } from '../../core/geometry/point.ts';
+import { formatQuantity } from '../../core/quantity/format.ts';
+import { measureAt, loadMeasures, type Measure } from '../session/measures.ts';
+import { SHOWN } from '../session/preferences.ts';
+import type { Session } from '../session/session.svelte.ts';
+import { theme } from '../session/theme.svelte.ts';
+import type { Grip } from './gestures.ts';
+import { handlesOf, nearestHandle, rounded, type Handle } from './handles.ts';
+import { itemAt } from './hit.ts';
+import { boardTheme } from './theme.ts';
+import { fitted, millimetresPerMetre, panned, resized, toMetres, toPixels, zoomed, type Viewport } from './viewport.ts';
+
+/** Room left round the drawing, px; below it for the legend. */
+const INSETS = { left: 28, top: 28, right: 28, bottom: 72 };
+/** Zoom for a press of a key or button. */
+const ZOOM_STEP = 1.25;
+/** A drawing smaller than this share of what would fit is fitted anew. */
+const SMALLEST_SHARE = 0.5;
+
+/** A figure opened for typing where it is lettered. */
+export interface Entry {
+  readonly measure: Measure;
+  /** Middle of the figure. */
+  readonly at: Point;
+}
+
+export class BoardView {
+  readonly #session: Session;
+  #viewport = $state.raw<Viewport | null>(null);
+  /** The person has not moved the paper, so it may be moved to keep the whole drawing in sight. */
+  #follows = true;
+  entry = $state.raw<Entry | null>(null);
+  /** The handle that is being moved. */
+  active = $state.raw<string | null>(null);
+
+  constructor(session: Session) {
+    this.#session = session;
+  }
+
+  readonly viewport: Viewport | null = $derived(this.#viewport);
+  readonly #scale: number | null = $derived(this.#viewport === null ? null : millimetresPerMetre(this.#viewport));
+  readonly scene: Scene | null = $derived.by(() => {
+    const { assessed } = this.#session;
+    return assessed === null || this.#scale === null ? null : elevation(assessed, { millimetresPerMetre: this.#scale });
+  });
+  readonly handles: readonly Handle[] = $derived.by(() => {
+    const { assessed } = this.#session;
+    return assessed === null || this.scene === null ? [] : handlesOf(assessed, this.scene);
+  });
+  readonly theme: Theme = $derived(boardTheme(theme.dark, theme.forced));
+  /** Joints that the selection points at. */
+  readonly marked: readonly Joint[] = $derived.by(() => {
+    const { selection, assessed } = this.#session;
+    const joint = selection?.kind === 'joint' ? assessed?.ring.joints[selection.joint] : undefined;
+    return joint === undefined ? [] : [joint];
+  });
+
+  resize(width: number, height: number): void {
+    if (width === 0 || height === 0) return;
+    const before = this.#viewport;
+    if (before === null || this.#follows) this.fit(width, height);
+    else this.#viewport = resized(before, width, height);
+  }
+
+  /** The whole drawing in sight, and kept in sight from now on. */
+  fit(width = this.#viewport?.width ?? 0, height = this.#viewport?.height ?? 0): void {
+    const { assessed } = this.#session;
+    this.#follows = true;
+    this.#viewport = fitted(width, height, INSETS, (scale) =>
+      assessed === null ? null : elevation(assessed, { millimetresPerMetre: scale }).bounds,
+    );
+  }
+
+  /** After an edit: fits again where the drawing has grown out of sight or shrunk to little, unless the paper was moved. */
+  keepInSight(): void {
+    const { scene, viewport } = this;
+    const bounds = scene?.bounds ?? null;
+    if (!this.#follows || bounds === null || viewport === null) return;
+    const { x: left, y: top } = toPixels(viewport, { x: bounds.left, y: bounds.top });
+    const { x: right, y: bottom } = toPixels(viewport, { x: bounds.right, y: bounds.bottom });
+    const { width, height } = viewport;
+    const inSight = left >= 0 && top >= 0 && right <= width && bottom <= height - INSETS.bottom / 2;
+    const share = Math.max((right - left) / (width - INSETS.left - INSETS.right), (bottom - top) / (height - INSETS.top - INSETS.bottom));
+    if (!inSight || share < SMALLEST_SHARE) this.fit();
+  }
+
+  pan(dx: number, dy: number): void {
+    if (this.#viewport === null) return;
+    this.#follows = false;
+    this.entry = null;
+    this.#viewport = panned(this.#viewport, dx, dy);
+  }
+
+  zoom(factor: number, pixel: Point): void {
+    if (this.#viewport === null) return;
+    this.#follows = false;
+    this.entry = null;
+    this.#viewport = zoomed(this.#viewport, factor, pixel);
+  }
+
+  zoomStep(direction: 1 | -1): void {
+    const { width, height } = this.#viewport ?? { width: 0, height: 0 };
+    this.zoom(ZOOM_STEP ** direction, { x: width / 2, y: height / 2 });
+  }
+
+  handleAt(pixel: Point, reach: number): Handle | null {
+    const { viewport } = this;
+    return viewport === null ? null : nearestHandle(this.handles, pixel, reach, (point) => toPixels(viewport, point));
+  }
+
+  /** Takes hold of a handle: it follows the pointer by as much as the pointer moves. */
+  grip(handle: Handle, start: Point): Grip {
+    const drag = this.#session.drag();
+    const scale = this.#viewport?.scale ?? 1;
+    this.active = handle.id;
+    this.entry = null;
+    const done = (): void => {
+      this.active = null;
+    };
+    return {
+      move: (pixel) => {
+        const metres = handle.axis === 'x' ? (pixel.x - start.x) / scale : (start.y - pixel.y) / scale;
+        const value = rounded(handle.value + handle.rate * metres, scale / Math.abs(handle.rate));
+        drag.preview((scheme) => handle.set(scheme, value));
+      },
+      release: () => {
+        drag.release(this.stepName(handle.id));
+        done();
+      },
+      abandon: () => {
+        drag.abandon();
+        done();
+      },
+    };
+  }
+
+  /** What a move of this handle is called, with the value it has come to: `rise 0.83 m`. */
+  stepName(id: string): string {
+    const handle = this.handles.find((candidate) => candidate.id === id);
+    return handle === undefined ? 'drag' : `${handle.measure} ${valueText(handle)}`;
+  }
+
+  /** A click that moved nothing: opens the figure under it, or points at what lies there. */
+  click(pixel: Point, reach: number): void {
+    const { scene, viewport } = this;
+    if (scene === null || viewport === null) return;
+    const item = itemAt(scene, toMetres(viewport, pixel), reach / 2 / viewport.scale);
+    const about = item?.about ?? null;
+    this.#session.selection = about;
+    const measure = item?.kind === 'text' && about !== null ? this.#measureOf(about) : null;
+    if (measure === null || item?.kind !== 'text') {
+      this.entry = null;
+      return;
+    }
+    const [lowerLeft, , upperRight] = textCorners(item, scene.millimetresPerUnit);
+    this.entry = { measure, at: { x: (lowerLeft.x + upperRight.x) / 2, y: (lowerLeft.y + upperRight.y) / 2 } };
+  }
+
+  /** Opens the figure that a handle sets, beside the handle. */
+  type(handle: Handle): void {
+    const measure = handle.path === null ? null : this.#measureOf({ kind: 'field', path: handle.path });
+    this.entry = measure === null ? null : { measure, at: handle.at };
+  }
+
+  #measureOf(about: About): Measure | null {
+    const resolved = this.#session.assessed?.resolved;
+    if (resolved === undefined) return null;
+    if (about.kind === 'field') return measureAt(resolved, about.path);
+    if (about.kind !== 'load') return null;
+    const load = resolved.loads.find(({ id }) => id === about.load);
+    return load === undefined ? null : (loadMeasures(load)[0] ?? null);
+  }
+}
+
+export const valueText = ({ value }: Handle): string => formatQuantity(value, 'length', SHOWN, { figures: 'exact' });

@@ -1,0 +1,12 @@
+import type { ExportedFile } from '../../app/host.ts';
+import type { AssessedScheme } from '../../core/assess/assess.ts';
+import { exportFileStem, FORMATS } from '../../core/export/formats.ts';
+import type { Job } from '../../core/job/schema.ts';
+
+/** The scheme that is shown as a drawing on a sheet, issued today. */
+export function drawingFile(assessed: AssessedScheme, job: Job): ExportedFile {
+  const { extension, mime, make } = FORMATS.svg;
+  const issuedOn = new Date().toLocaleDateString('en-CA');
+  const drawing = make({ job, assessed }, { issuedOn });
+  return { name: `${exportFileStem(assessed)}.${extension}`, mime, bytes: new TextEncoder().encode(drawing) };
+}

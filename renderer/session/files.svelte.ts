@@ -1,0 +1,111 @@
+/** Documents between session and shell: new, open, save, export; and what the person must be told or asked on the way. */
+import type { ExportedFile, Host, OpenedFile, Outcome } from '../../app/host.ts';
+import { readJobFile, writeJobFile } from '../../core/job/archive.ts';
+import type { DrawnShape } from '../../core/job/edits.ts';
+import { freshJob } from '../../core/job/fresh.ts';
+import { problemSentence } from '../../core/job/problem.ts';
+import { jobFileName } from './names.ts';
+import type { Session } from './session.svelte.ts';
+
+export interface Notice {
+  readonly kind: 'problem' | 'done';
+  readonly text: string;
+  /** One line for each thing that is wrong with a file. */
+  readonly details: readonly string[];
+}
+
+export type UnsavedAnswer = 'save' | 'discard' | 'stay';
+
+/** Beyond these, the rest of a file's problems are counted. */
+const MOST_DETAILS = 8;
+
+export class Files {
+  notice = $state.raw<Notice | null>(null);
+  /** Set while the person is asked what to do with unsaved work. */
+  question = $state.raw<((answer: UnsavedAnswer) => void) | null>(null);
+  readonly #session: Session;
+  readonly #host: Host;
+
+  constructor(session: Session, host: Host) {
+    this.#session = session;
+    this.#host = host;
+  }
+
+  async begin(shape: DrawnShape): Promise<void> {
+    if (!(await this.mayLeave())) return;
+    this.#session.open({ job: freshJob(shape), photographs: new Map(), file: null });
+    this.notice = null;
+  }
+
+  async open(): Promise<void> {
+    if (!(await this.mayLeave())) return;
+    this.take(await this.#host.open());
+  }
+
+  /** A file that the shell brings by itself. */
+  async receive(opened: Outcome<OpenedFile>): Promise<void> {
+    if (opened.kind !== 'done' || (await this.mayLeave())) this.take(opened);
+  }
+
+  take(opened: Outcome<OpenedFile>): void {
+    const found = this.#settled(opened);
+    if (found === null) return;
+    const { file, bytes } = found;
+    const reading = readJobFile(bytes);
+    if (reading.ok) {
+      this.#session.open({ job: reading.job, photographs: reading.photographs, file });
+      this.notice = null;
+      return;
+    }
+    const sentences = reading.problems.map(problemSentence);
+    const left = sentences.length - MOST_DETAILS;
+    const details = left > 0 ? [...sentences.slice(0, MOST_DETAILS), `and ${left} more`] : sentences;
+    this.notice = { kind: 'problem', text: `${file.name} could not be opened.`, details };
+  }
+
+  /** @returns whether the work is now in a file. */
+  async save(): Promise<boolean> {
+    const { file, settled, photographs } = this.#session;
+    if (file === null) return this.saveAs();
+    const bytes = writeJobFile(settled, photographs);
+    const saved = this.#settled(await this.#host.save(file, bytes));
+    if (saved !== null) this.#saved(settled, saved);
+    return saved !== null;
+  }
+
+  async saveAs(): Promise<boolean> {
+    const { file, settled, photographs } = this.#session;
+    const bytes = writeJobFile(settled, photographs);
+    const saved = this.#settled(await this.#host.saveAs(file?.name ?? jobFileName(settled), bytes));
+    if (saved !== null) this.#saved(settled, saved);
+    return saved !== null;
+  }
+
+  async export(file: ExportedFile): Promise<void> {
+    const where = this.#settled(await this.#host.exportFile(file));
+    if (where !== null) this.notice = { kind: 'done', text: `The drawing is in ${where}.`, details: [] };
+  }
+
+  /** Whether the open document may be put away: it is saved, or the person lets its changes go. */
+  async mayLeave(): Promise<boolean> {
+    if (!this.#session.dirty) return true;
+    const answer = await new Promise<UnsavedAnswer>((resolve) => {
+      this.question?.('stay');
+      this.question = resolve;
+    });
+    this.question = null;
+    return answer === 'save' ? this.save() : answer === 'discard';
+  }
+
+  #saved(job: Parameters<Session['kept']>[0], file: Parameters<Session['kept']>[1]): void {
+    this.#session.kept(job, file);
+    this.notice = { kind: 'done', text: `Saved as ${file.name}.`, details: [] };
+  }
+
+  /** The value of what went well; a failure is told, a closed dialog is not. */
+  #settled<Value>(outcome: Outcome<Value>): Value | null {
+    if (outcome.kind === 'done') return outcome.value;
+    if (outcome.kind === 'failed') this.notice = { kind: 'problem', text: outcome.reason, details: [] };
+    return null;
+  }
+}
