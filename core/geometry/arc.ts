@@ -52,10 +52,10 @@ export class Arc implements OffsettableCurve {
     return [{ kind: 'arc', to: this.at(u1), centre: this.centre, radius: this.radius, from: u0, turn: u1 - u0 }];
   }
 
-  offset(thickness: ThicknessLaw): Curve {
-    return thickness.rate === 0
-      ? new Arc(this.centre, this.radius + thickness.atStart, this.from, this.to)
-      : this.smooth().offset(thickness);
+  offset({ atStart, rate }: ThicknessLaw): Curve {
+    return rate === 0
+      ? new Arc(this.centre, this.radius + atStart, this.from, this.to)
+      : this.smooth().offsetBy(rate, (u) => atStart + rate * this.length(this.from, u));
   }
 
   part(u0: number, u1: number): Arc {

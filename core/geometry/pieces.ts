@@ -11,6 +11,8 @@ export interface Piece {
   readonly extrados: Curve;
   /** The extrados parameter of the joint that stands square on the intrados at u, or as the shape's joints run. */
   across(u: number): number;
+  /** Length of the intrados, m. */
+  readonly length: number;
   /** Where the extrados really begins and ends: at an apex it runs on, or stops short, to meet its neighbour. */
   readonly extradosFrom: number;
   readonly extradosTo: number;
@@ -99,7 +101,12 @@ function taperedPieces(curves: readonly OffsettableCurve[], { crown, springing }
 }
 
 function joined(faces: readonly Faces[]): Piece[] {
-  const pieces = faces.map((face) => ({ ...face, extradosFrom: face.extrados.from, extradosTo: face.extrados.to }));
+  const pieces = faces.map((face) => ({
+    ...face,
+    length: face.intrados.length(face.intrados.from, face.intrados.to),
+    extradosFrom: face.extrados.from,
+    extradosTo: face.extrados.to,
+  }));
   for (let i = 0; i + 1 < pieces.length; i++) {
     const left = pieces[i] as (typeof pieces)[number];
     const right = pieces[i + 1] as (typeof pieces)[number];

@@ -4,7 +4,7 @@
  */
 import { ProblemError } from '../job/problem.ts';
 import type { Profile } from '../job/schema.ts';
-import type { Edge } from './curve.ts';
+import type { Curve, Edge } from './curve.ts';
 import { centroid, lineMoments, type Moments } from './moments.ts';
 import { ringPieces, type Piece, type Thickness } from './pieces.ts';
 import type { Point } from './point.ts';
@@ -25,6 +25,8 @@ interface Station extends Joint {
 export interface RingBlock {
   readonly area: number;
   readonly centroid: Point;
+  /** Boundary integrals along the whole of its extrados, left to right, about its left joint's intrados. */
+  readonly back: Moments;
 }
 
 export interface RingForm {
@@ -41,8 +43,10 @@ export interface RingGeometry {
   readonly crownExtrados: Point;
   /** The highest point of the intrados, m. */
   readonly crownIntrados: Point;
-  /** Boundary integrals along the sky-facing extrados of one block, with the ends of that stretch; null where none is. */
-  readonly skyFace: (block: number, origin: Point) => SkyFace | null;
+  /** The ring with one more joint at the crown, or itself where a joint stands there; and the crown joint's number. */
+  readonly splitAtCrown: () => { readonly ring: RingGeometry; readonly crown: number };
+  /** The sky-facing stretch of one block's extrados; null where its whole back faces down. */
+  readonly skyFace: (block: number) => SkyFace | null;
   /** The outline of one block: from its left joint's intrados along the soffit, up, back along the extrados. */
   readonly outline: (block: number) => Outline;
 }
@@ -50,7 +54,9 @@ export interface RingGeometry {
 export interface SkyFace {
   readonly from: Point;
   readonly to: Point;
+  /** Boundary integrals from `from` to `to`, about `origin`. */
   readonly moments: Moments;
+  readonly origin: Point;
 }
 
 /** A closed figure; the last edge returns to `start`. */
@@ -66,31 +72,18 @@ export interface Outline {
  */
 export function buildRing(form: RingForm): RingGeometry {
   const pieces = ringPieces(form.profile, form.thickness);
-  return ringOf(pieces, stationsOf(pieces, form.voussoirs, form.joints));
-}
-
-/** The ring with one more joint, plumb or square like the others, at the crown; and the crown joint's number. */
-export function buildRingSplitAtCrown(form: RingForm): { ring: RingGeometry; crown: number } {
-  const pieces = ringPieces(form.profile, form.thickness);
-  const stations = stationsOf(pieces, form.voussoirs, form.joints);
-  const place = highestPlace(pieces);
-  const found = stations.findIndex((station) => Math.abs(station.intrados.x - place.x) <= SAME_PLACE * widthOf(pieces));
-  if (found >= 0) return { ring: ringOf(pieces, stations), crown: found };
-  const crown = stations.findIndex((station) => station.intrados.x > place.x);
-  const square = stationAtLength(pieces, place.length);
-  const split = form.joints === 'vertical' ? plumb(pieces, square) : square;
-  return { ring: ringOf(pieces, [...stations.slice(0, crown), split, ...stations.slice(crown)]), crown };
+  return ringOf(pieces, stationsOf(pieces, form.voussoirs, form.joints), form.joints);
 }
 
 /** The crown: the highest place of the intrados, with its distance along the intrados from the left springing. */
 function highestPlace(pieces: readonly Piece[]): Point & { length: number } {
   let best = { x: 0, y: -Infinity, length: 0 };
   let start = 0;
-  for (const { intrados } of pieces) {
+  for (const { intrados, length } of pieces) {
     const u = intrados.highest(intrados.from, intrados.to);
     const { x, y } = intrados.at(u);
     if (y > best.y) best = { x, y, length: start + intrados.length(intrados.from, u) };
-    start += intrados.length(intrados.from, intrados.to);
+    start += length;
   }
   return best;
 }
@@ -116,22 +109,32 @@ function pieceAt(pieces: readonly Piece[], index: number): Piece {
   return piece;
 }
 
-function ringOf(pieces: readonly Piece[], stations: readonly Station[]): RingGeometry {
-  const blocks: RingBlock[] = [];
-  for (let k = 0; k + 1 < stations.length; k++) blocks.push(blockOf(pieces, stations[k] as Station, stations[k + 1] as Station));
+function ringOf(pieces: readonly Piece[], stations: readonly Station[], joints: RingForm['joints']): RingGeometry {
   const station = (k: number): Station => stations[k] as Station;
-  return {
-    joints: stations.map(({ intrados, extrados }) => ({ intrados, extrados })),
+  const crownIntrados = highestPlace(pieces);
+  const blocks = stations.slice(1).map((right, k) => blockOf(pieces, station(k), right));
+  const ring: RingGeometry = {
+    joints: stations,
     blocks,
     crownExtrados: highestOfBack(pieces),
-    crownIntrados: highestPlace(pieces),
-    skyFace: (block, origin) => skyFaceOf(pieces, station(block), station(block + 1), origin),
+    crownIntrados,
+    splitAtCrown: () => {
+      const near = SAME_PLACE * widthOf(pieces);
+      const found = stations.findIndex(({ intrados }) => Math.abs(intrados.x - crownIntrados.x) <= near);
+      if (found >= 0) return { ring, crown: found };
+      const crown = stations.findIndex(({ intrados }) => intrados.x > crownIntrados.x);
+      const square = stationAtLength(pieces, crownIntrados.length);
+      const split = joints === 'vertical' ? plumb(pieces, square) : square;
+      return { ring: ringOf(pieces, [...stations.slice(0, crown), split, ...stations.slice(crown)], joints), crown };
+    },
+    skyFace: (block) => skyFaceOf(pieces, station(block), station(block + 1), blocks[block] as RingBlock),
     outline: (block) => outlineOf(pieces, station(block), station(block + 1)),
   };
+  return ring;
 }
 
 function stationsOf(pieces: readonly Piece[], count: number, joints: RingForm['joints']): Station[] {
-  const total = pieces.reduce((sum, { intrados }) => sum + intrados.length(intrados.from, intrados.to), 0);
+  const total = pieces.reduce((sum, { length }) => sum + length, 0);
   const stations: Station[] = [];
   for (let i = 0; i <= count; i++) {
     const square = stationAtLength(pieces, (total * i) / count);
@@ -143,8 +146,7 @@ function stationsOf(pieces: readonly Piece[], count: number, joints: RingForm['j
 function stationAtLength(pieces: readonly Piece[], length: number): Station {
   let start = 0;
   for (let i = 0; i < pieces.length; i++) {
-    const { intrados, across, extradosFrom, extradosTo, extrados } = pieceAt(pieces, i);
-    const own = intrados.length(intrados.from, intrados.to);
+    const { intrados, across, extradosFrom, extradosTo, extrados, length: own } = pieceAt(pieces, i);
     const into = length - start;
     const last = i === pieces.length - 1;
     const tolerance = SAME_PLACE * own;
@@ -184,77 +186,92 @@ function plumb(pieces: readonly Piece[], square: Station): Station {
 const clampBetween = (u: number, a: number, b: number): number =>
   Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
 
-/** Stretches of one face between two places, left to right, each on one curve. */
-function stretches(
+/** Visits the stretches of one face between two places, left to right, each on one curve. */
+function eachStretch(
   pieces: readonly Piece[],
   face: 'intrados' | 'extrados',
-  from: { piece: number; u: number },
-  to: { piece: number; u: number },
-): { curve: Piece['intrados']; u0: number; u1: number }[] {
-  const found = [];
-  for (let i = from.piece; i <= to.piece; i++) {
-    const piece = pieceAt(pieces, i);
-    const curve = piece[face];
-    const start = face === 'intrados' ? curve.from : piece.extradosFrom;
-    const end = face === 'intrados' ? curve.to : piece.extradosTo;
-    const u0 = i === from.piece ? from.u : start;
-    const u1 = i === to.piece ? to.u : end;
-    if (u0 !== u1) found.push({ curve, u0, u1 });
+  left: Station,
+  right: Station,
+  visit: (curve: Curve, u0: number, u1: number) => void,
+): void {
+  const soffit = face === 'intrados';
+  const first = soffit ? left.piece : left.topPiece;
+  const last = soffit ? right.piece : right.topPiece;
+  for (let i = first; i <= last; i++) {
+    const { intrados, extrados, extradosFrom, extradosTo } = pieceAt(pieces, i);
+    const start = soffit ? intrados.from : extradosFrom;
+    const end = soffit ? intrados.to : extradosTo;
+    const u0 = i > first ? start : soffit ? left.u : left.topU;
+    const u1 = i < last ? end : soffit ? right.u : right.topU;
+    if (u0 !== u1) visit(soffit ? intrados : extrados, u0, u1);
   }
-  return found;
 }
-
-const soffit = (pieces: readonly Piece[], left: Station, right: Station) => stretches(pieces, 'intrados', left, right);
-const back = (pieces: readonly Piece[], left: Station, right: Station) =>
-  stretches(pieces, 'extrados', { piece: left.topPiece, u: left.topU }, { piece: right.topPiece, u: right.topU });
 
 function blockOf(pieces: readonly Piece[], left: Station, right: Station): RingBlock {
   const origin = left.intrados;
-  let area = 0;
-  let sx = 0;
-  let sy = 0;
-  const add = (part: Moments, sign: number): void => {
-    area += sign * part.area;
-    sx += sign * part.sx;
-    sy += sign * part.sy;
-  };
-  for (const { curve, u0, u1 } of soffit(pieces, left, right)) add(curve.moments(u0, u1, origin), 1);
-  add(lineMoments(right.intrados, right.extrados, origin), 1);
-  for (const { curve, u0, u1 } of back(pieces, left, right)) add(curve.moments(u0, u1, origin), -1);
-  add(lineMoments(left.extrados, left.intrados, origin), 1);
-  return { area, centroid: centroid({ area, sx, sy }, origin) };
+  const soffit = faceMoments(pieces, 'intrados', left, right, origin);
+  const back = faceMoments(pieces, 'extrados', left, right, origin);
+  const rightJoint = lineMoments(right.intrados, right.extrados, origin);
+  const leftJoint = lineMoments(left.extrados, left.intrados, origin);
+  const area = soffit.area + rightJoint.area - back.area + leftJoint.area;
+  const sx = soffit.sx + rightJoint.sx - back.sx + leftJoint.sx;
+  const sy = soffit.sy + rightJoint.sy - back.sy + leftJoint.sy;
+  return { area, centroid: centroid({ area, sx, sy }, origin), back };
 }
 
-function skyFaceOf(pieces: readonly Piece[], left: Station, right: Station, origin: Point): SkyFace | null {
-  let from: Point | null = null;
-  let to: Point | null = null;
-  let area = 0;
-  let sx = 0;
-  let sy = 0;
-  for (const { curve, u0, u1 } of back(pieces, left, right)) {
-    const { from: sky0, to: sky1 } = curve.skyward;
-    const a = clampBetween(u0, sky0, sky1);
-    const b = clampBetween(u1, sky0, sky1);
-    if (a === b) continue;
-    const part = curve.moments(a, b, origin);
-    area += part.area;
-    sx += part.sx;
-    sy += part.sy;
-    from ??= curve.at(a);
-    to = curve.at(b);
+function faceMoments(
+  pieces: readonly Piece[],
+  face: 'intrados' | 'extrados',
+  left: Station,
+  right: Station,
+  origin: Point,
+): Moments {
+  let sum: Moments = { area: 0, sx: 0, sy: 0 };
+  eachStretch(pieces, face, left, right, (curve, u0, u1) => {
+    const { area, sx, sy } = curve.moments(u0, u1, origin);
+    sum = { area: sum.area + area, sx: sum.sx + sx, sy: sum.sy + sy };
+  });
+  return sum;
+}
+
+function skyFaceOf(pieces: readonly Piece[], left: Station, right: Station, { back }: RingBlock): SkyFace | null {
+  const origin = left.intrados;
+  const open: { curve: Curve; a: number; b: number }[] = [];
+  let clipped = false;
+  eachStretch(pieces, 'extrados', left, right, (curve, u0, u1) => {
+    const { from, to } = curve.skyward;
+    const a = clampBetween(u0, from, to);
+    const b = clampBetween(u1, from, to);
+    if (a !== u0 || b !== u1) clipped = true;
+    if (a !== b) open.push({ curve, a, b });
+  });
+  const first = open[0];
+  const last = open[open.length - 1];
+  if (!first || !last) return null;
+  if (!clipped) return { from: left.extrados, to: right.extrados, moments: back, origin };
+  let moments: Moments = { area: 0, sx: 0, sy: 0 };
+  for (const { curve, a, b } of open) {
+    const { area, sx, sy } = curve.moments(a, b, origin);
+    moments = { area: moments.area + area, sx: moments.sx + sx, sy: moments.sy + sy };
   }
-  return from === null || to === null ? null : { from, to, moments: { area, sx, sy } };
+  return { from: first.curve.at(first.a), to: last.curve.at(last.b), moments, origin };
 }
 
 function outlineOf(pieces: readonly Piece[], left: Station, right: Station): Outline {
+  const soffit: Edge[] = [];
+  const back: Edge[][] = [];
+  eachStretch(pieces, 'intrados', left, right, (curve, u0, u1) => {
+    soffit.push(...curve.edges(u0, u1));
+  });
+  eachStretch(pieces, 'extrados', left, right, (curve, u0, u1) => {
+    back.push(curve.edges(u1, u0));
+  });
   return {
     start: left.intrados,
     edges: [
-      ...soffit(pieces, left, right).flatMap(({ curve, u0, u1 }) => curve.edges(u0, u1)),
+      ...soffit,
       { kind: 'line', to: right.extrados },
-      ...back(pieces, left, right)
-        .reverse()
-        .flatMap(({ curve, u0, u1 }) => curve.edges(u1, u0)),
+      ...back.reverse().flat(),
       { kind: 'line', to: left.intrados },
     ],
   };

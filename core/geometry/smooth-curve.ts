@@ -1,7 +1,7 @@
 import type { Curve, Edge, OffsettableCurve, ThicknessLaw } from './curve.ts';
 import type { Moments } from './moments.ts';
 import type { Point } from './point.ts';
-import { eachGaussPoint } from './quadrature.ts';
+import { SIX_POINTS, TEN_POINTS, type GaussRule } from './quadrature.ts';
 
 /** A point of a curve with its first and second derivatives by the parameter. */
 export interface Jet {
@@ -15,40 +15,32 @@ export interface Jet {
 
 /** Chords in which a curve is drawn for a quarter turn of its direction: the sagitta stays under 1/3000 of the radius. */
 const CHORDS_PER_QUARTER_TURN = 32;
-/** Spans of quadrature over a whole curve; ten Gauss points in each leave rounding as the only error for arches. */
-const SPANS = 8;
+/** Spans of quadrature over a whole face of an arch; ten Gauss points in each leave rounding as the only error. */
+const SPANS_OF_A_FACE = 8;
 const NEWTON_STEPS = 60;
 /** Halvings that take any bracket below the rounding of its ends. */
 const HALVINGS = 60;
-/** Places looked at before a highest point is closed in on. */
-const SCAN = 64;
-
-const clampBetween = (u: number, a: number, b: number): number =>
-  Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
-
-/** Between a place where `holds` is true and one where it is not: the last parameter at which it still is, by halving. */
-function lastWhere(holds: (u: number) => boolean, yes: number, no: number): number {
-  for (let step = 0; step < HALVINGS; step++) {
-    const u = (yes + no) / 2;
-    if (holds(u)) yes = u;
-    else no = u;
-  }
-  return yes;
-}
+/** Places looked at in each span before a highest or sharpest place is closed in on. */
+const LOOKS_PER_SPAN = 8;
 
 /** A curve given by its point and two derivatives; integrals by Gauss–Legendre, inverse questions by safeguarded Newton. */
 export class SmoothCurve implements OffsettableCurve {
+  private lengthTable: Float64Array | null = null;
+
+  /** @param spans stretches of equal parameter within which the curve has all its derivatives and turns little. */
   constructor(
     readonly from: number,
     readonly to: number,
     private readonly jet: (u: number) => Jet,
+    private readonly spans = SPANS_OF_A_FACE,
   ) {}
 
   get hollowRadius(): number {
     let least = Infinity;
-    for (let i = 0; i <= SCAN; i++) {
-      const { dx, dy, ddx, ddy } = this.jet(this.from + ((this.to - this.from) * i) / SCAN);
-      const bend = (dx * ddy - dy * ddx) * Math.sign(this.to - this.from);
+    const looks = this.spans * LOOKS_PER_SPAN;
+    for (let i = 0; i <= looks; i++) {
+      const { dx, dy, ddx, ddy } = this.jet(this.from + ((this.to - this.from) * i) / looks);
+      const bend = (dx * ddy - dy * ddx) * this.direction;
       if (bend > 0) least = Math.min(least, Math.hypot(dx, dy) ** 3 / bend);
     }
     return least;
@@ -70,46 +62,43 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   normal(u: number): Point {
-    const direction = Math.sign(this.to - this.from);
     const { dx, dy } = this.jet(u);
-    const speed = direction * Math.hypot(dx, dy);
+    const speed = this.direction * Math.hypot(dx, dy);
     return { x: -dy / speed, y: dx / speed };
   }
 
   moments(u0: number, u1: number, origin: Point): Moments {
+    const parts = this.partsOf(u0, u1);
+    const rule = this.ruleFor((u1 - u0) / parts);
+    const half = (u1 - u0) / parts / 2;
     let area = 0;
     let sx = 0;
     let sy = 0;
-    this.eachSpan(u0, u1, (a, b) => {
-      eachGaussPoint(a, b, (u, weight) => {
-        const { x, y, dx, dy } = this.jet(u);
+    for (let part = 0; part < parts; part++) {
+      const middle = u0 + (2 * part + 1) * half;
+      for (let i = 0; i < rule.points; i++) {
+        const { x, y, dx, dy } = this.jet(middle + half * (rule.nodes[i] as number));
+        const weight = half * (rule.weights[i] as number);
         const px = x - origin.x;
         const py = y - origin.y;
         area += (weight * (px * dy - py * dx)) / 2;
         sx += (weight * px * px * dy) / 2;
         sy -= (weight * py * py * dx) / 2;
-      });
-    });
+      }
+    }
     return { area, sx, sy };
   }
 
   length(u0: number, u1: number): number {
-    let length = 0;
-    this.eachSpan(u0, u1, (a, b) => {
-      eachGaussPoint(a, b, (u, weight) => {
-        const { dx, dy } = this.jet(u);
-        length += Math.abs(weight) * Math.hypot(dx, dy);
-      });
-    });
-    return length;
+    return Math.abs(this.lengthTo(u1) - this.lengthTo(u0));
   }
 
   parameterAtLength(length: number): number {
     return this.solve(
-      (u) => this.length(this.from, u) - length,
+      (u) => this.lengthTo(u) - length,
       (u) => {
         const { dx, dy } = this.jet(u);
-        return Math.sign(this.to - this.from) * Math.hypot(dx, dy);
+        return this.direction * Math.hypot(dx, dy);
       },
     );
   }
@@ -142,16 +131,21 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   offset(thickness: ThicknessLaw): Curve {
-    const direction = Math.sign(this.to - this.from);
-    return new SmoothCurve(this.from, this.to, (u) => {
+    const { atStart, rate } = thickness;
+    return this.offsetBy(rate, rate === 0 ? () => atStart : (u) => atStart + rate * this.lengthTo(u));
+  }
+
+  /** The offset curve for a thickness given at each u, changing by `rate` for each metre along this curve. */
+  offsetBy(rate: number, thicknessAt: (u: number) => number): SmoothCurve {
+    const offsetJet = (u: number): Jet => {
       const { x, y, dx, dy, ddx, ddy } = this.jet(u);
-      const speed = direction * Math.hypot(dx, dy);
+      const speed = this.direction * Math.hypot(dx, dy);
       const nx = -dy / speed;
       const ny = dx / speed;
       // the normal turns with the tangent: dn/du = −(bend / speed²) · (dx, dy) / speed
       const bend = (dx * ddy - dy * ddx) / (speed * speed);
-      const t = thickness.atStart + (thickness.rate === 0 ? 0 : thickness.rate * this.lengthTo(u));
-      const dt = thickness.rate * speed;
+      const t = thicknessAt(u);
+      const dt = rate * speed;
       return {
         x: x + t * nx,
         y: y + t * ny,
@@ -161,61 +155,95 @@ export class SmoothCurve implements OffsettableCurve {
         ddx: 0,
         ddy: 0,
       };
-    });
+    };
+    return new SmoothCurve(this.from, this.to, offsetJet, this.spans);
   }
 
   part(u0: number, u1: number): SmoothCurve {
-    return new SmoothCurve(u0, u1, this.jet);
+    return new SmoothCurve(u0, u1, this.jet, this.partsOf(u0, u1));
   }
 
   sheared(slope: number): SmoothCurve {
-    return new SmoothCurve(this.from, this.to, (u) => {
+    const shearedJet = (u: number): Jet => {
       const { x, y, dx, dy, ddx, ddy } = this.jet(u);
       return { x, y: y + slope * x, dx, dy: dy + slope * dx, ddx, ddy: ddy + slope * ddx };
-    });
+    };
+    return new SmoothCurve(this.from, this.to, shearedJet, this.spans);
   }
 
   highest(u0: number, u1: number): number {
+    const looks = LOOKS_PER_SPAN * this.partsOf(u0, u1);
     let best = u0;
     let bestY = this.at(u0).y;
-    for (let i = 1; i <= SCAN; i++) {
-      const u = u0 + ((u1 - u0) * i) / SCAN;
+    for (let i = 1; i <= looks; i++) {
+      const u = u0 + ((u1 - u0) * i) / looks;
       const { y } = this.at(u);
       if (y > bestY) [best, bestY] = [u, y];
     }
-    const stride = (u1 - u0) / SCAN;
-    const climbing = (u: number): boolean => this.jet(u).dy * (this.to - this.from) > 0;
+    const stride = (u1 - u0) / looks;
+    const climbing = (u: number): boolean => this.jet(u).dy * this.direction > 0;
     const before = clampBetween(best - stride, u0, u1);
     const after = clampBetween(best + stride, u0, u1);
     return climbing(before) && !climbing(after) ? lastWhere(climbing, before, after) : best;
   }
 
+  private get direction(): number {
+    return Math.sign(this.to - this.from);
+  }
+
   /** From the middle, which faces the sky, towards an end: without bound, or to where the curve turns under itself. */
   private lastSkyward(middle: number, end: number): number {
-    const faces = (u: number): boolean => this.jet(u).dx * (this.to - this.from) >= 0;
+    const faces = (u: number): boolean => this.jet(u).dx * this.direction >= 0;
     return faces(end) ? Math.sign(end - middle) * Infinity : lastWhere(faces, middle, end);
   }
 
   /** Length from the start to u; negative before the start, where a face carried on past its end may lie. */
   private lengthTo(u: number): number {
-    return Math.sign((u - this.from) * (this.to - this.from)) * this.length(this.from, u);
+    const table = (this.lengthTable ??= this.makeLengthTable());
+    const span = (this.to - this.from) / this.spans;
+    const index = Math.min(this.spans - 1, Math.max(0, Math.floor((u - this.from) / span)));
+    return (table[index] as number) + this.stretchLength(this.from + index * span, u);
   }
 
-  /** Cuts a stretch so that no span of quadrature is longer than an eighth of the curve. */
-  private eachSpan(u0: number, u1: number, visit: (a: number, b: number) => void): void {
-    const count = Math.max(1, Math.ceil((SPANS * Math.abs(u1 - u0)) / Math.abs(this.to - this.from)));
-    for (let i = 0; i < count; i++) {
-      visit(u0 + ((u1 - u0) * i) / count, u0 + ((u1 - u0) * (i + 1)) / count);
+  private makeLengthTable(): Float64Array {
+    const table = new Float64Array(this.spans);
+    const span = (this.to - this.from) / this.spans;
+    for (let i = 1; i < this.spans; i++) {
+      table[i] = (table[i - 1] as number) + this.stretchLength(this.from + (i - 1) * span, this.from + i * span);
     }
+    return table;
+  }
+
+  /** Length of a stretch no longer than a span, negative when it runs against the curve. */
+  private stretchLength(u0: number, u1: number): number {
+    const rule = this.ruleFor(u1 - u0);
+    const middle = (u0 + u1) / 2;
+    const half = (u1 - u0) / 2;
+    let length = 0;
+    for (let i = 0; i < rule.points; i++) {
+      const { dx, dy } = this.jet(middle + half * (rule.nodes[i] as number));
+      length += (rule.weights[i] as number) * Math.sqrt(dx * dx + dy * dy);
+    }
+    return this.direction * half * length;
+  }
+
+  private partsOf(u0: number, u1: number): number {
+    return Math.max(1, Math.ceil((this.spans * Math.abs(u1 - u0)) / Math.abs(this.to - this.from) - 1e-9));
+  }
+
+  private ruleFor(stretch: number): GaussRule {
+    return 2 * this.spans * Math.abs(stretch) <= Math.abs(this.to - this.from) ? SIX_POINTS : TEN_POINTS;
   }
 
   /** Root of a function that changes sign once along the curve: Newton, and halving where Newton leaves the bracket. */
   private solve(value: (u: number) => number, slope: (u: number) => number): number {
     let low = this.from;
     let high = this.to;
-    if (value(low) >= 0) return low;
-    if (value(high) <= 0) return high;
-    let u = (low + high) / 2;
+    const atLow = value(low);
+    const atHigh = value(high);
+    if (atLow >= 0) return low;
+    if (atHigh <= 0) return high;
+    let u = low + (high - low) * (atLow / (atLow - atHigh));
     for (let step = 0; step < NEWTON_STEPS; step++) {
       const f = value(u);
       if (f === 0) return u;
@@ -224,9 +252,22 @@ export class SmoothCurve implements OffsettableCurve {
       const next = u - f / slope(u);
       const inside = (next - low) * (next - high) < 0;
       const chosen = inside ? next : (low + high) / 2;
-      if (Math.abs(chosen - u) <= Number.EPSILON * Math.abs(this.to - this.from)) return chosen;
+      if (Math.abs(chosen - u) <= 2 * Number.EPSILON * Math.abs(this.to - this.from)) return chosen;
       u = chosen;
     }
     return u;
   }
+}
+
+const clampBetween = (u: number, a: number, b: number): number =>
+  Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
+
+/** Between a place where `holds` is true and one where it is not: the last parameter at which it still is, by halving. */
+function lastWhere(holds: (u: number) => boolean, yes: number, no: number): number {
+  for (let step = 0; step < HALVINGS; step++) {
+    const u = (yes + no) / 2;
+    if (holds(u)) yes = u;
+    else no = u;
+  }
+  return yes;
 }

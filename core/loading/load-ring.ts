@@ -23,7 +23,7 @@ export function loadRing(ring: RingGeometry, scheme: ResolvedScheme): Block[] {
   addSelfWeight(forces, ring, masonry.unitWeight, breadth);
   if (above.kind !== 'none' || loads.length > 0) {
     const sky = skyOver(ring);
-    if (above.kind !== 'none') addAbove(forces, ring, sky, topLevel(ring, scheme), above.unitWeight, breadth);
+    if (above.kind !== 'none') addAbove(forces, sky, topLevel(ring, scheme), above.unitWeight, breadth);
     const problems: Problem[] = [];
     loads.forEach((load, i) => {
       problems.push(...underPath(`loads[${i}]`, addLoad(forces, sky, load, breadth)));

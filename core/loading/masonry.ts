@@ -1,7 +1,6 @@
 /** Weights of the ring and of what lies on it, with their places: exact areas and centroids, kN on the whole breadth. */
 import { centroid, lineMoments, type Moments } from '../geometry/moments.ts';
-import type { Point } from '../geometry/point.ts';
-import type { RingGeometry } from '../geometry/ring.ts';
+import type { RingGeometry, SkyFace } from '../geometry/ring.ts';
 import type { BlockForces } from './forces.ts';
 import type { Sky } from './sky.ts';
 
@@ -16,7 +15,6 @@ export function addSelfWeight(forces: BlockForces, ring: RingGeometry, unitWeigh
 /** What stands between the back of the ring and a level top at `top` (m). `unitWeight` kN/m³, `breadth` m. */
 export function addAbove(
   forces: BlockForces,
-  ring: RingGeometry,
   sky: Sky,
   top: number,
   unitWeight: number,
@@ -25,17 +23,17 @@ export function addAbove(
   if (unitWeight === 0) return;
   for (const k of sky.open) {
     const face = sky.faces[k];
-    const origin = ring.blocks[k]?.centroid;
-    if (!face || !origin) continue;
-    const column = columnMoments(face, top, origin);
+    if (!face) continue;
+    const column = columnMoments(face, top);
     if (!(column.area > 0)) continue;
-    const { x, y } = centroid(column, origin);
+    const { x, y } = centroid(column, face.origin);
     forces[k]?.push({ x, y, fx: 0, fy: -column.area * unitWeight * breadth, from: 'above' });
   }
 }
 
 /** The column between a stretch of the back and the level top: along the back, up, back along the top, down. */
-function columnMoments(face: { from: Point; to: Point; moments: Moments }, top: number, origin: Point): Moments {
+function columnMoments(face: SkyFace, top: number): Moments {
+  const { origin } = face;
   const right = { x: face.to.x, y: top };
   const left = { x: face.from.x, y: top };
   const parts = [

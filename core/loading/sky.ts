@@ -15,7 +15,7 @@ export interface Sky {
 }
 
 export function skyOver(ring: RingGeometry): Sky {
-  const faces = ring.blocks.map((block, k) => ring.skyFace(k, block.centroid));
+  const faces = ring.blocks.map((_, k) => ring.skyFace(k));
   const open = faces.flatMap((face, k) => (face === null ? [] : [k]));
   const face = (k: number | undefined): SkyFace => {
     const found = k === undefined ? null : faces[k];

@@ -50,7 +50,7 @@ export function minimiseUncrushed(rows: Rows, limit: CrushingLimit, c: readonly 
     if (worst === null) break;
     setTangent(limit, worst, a, b, count, d);
     count++;
-    outcome = withThrustBound(limit, { unknowns: d, count, a, b }, c);
+    outcome = minimise({ unknowns: d, count, a, b }, c, outcome.basis);
   }
   return outcome;
 }

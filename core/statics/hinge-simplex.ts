@@ -49,17 +49,26 @@ export class UndecidedError extends Error {
   override readonly name = 'UndecidedError';
 }
 
-export function minimise(rows: Rows, c: readonly number[]): SimplexOutcome {
+/**
+ * @param start rows of a basis to begin from, such as that of a neighbouring question; used where its multipliers are
+ * still positive, and otherwise passed over without a word.
+ */
+export function minimise(rows: Rows, c: readonly number[], start?: readonly Multiplier[]): SimplexOutcome {
   let outcome: SimplexOutcome = { kind: 'unbounded' };
   for (const box of BOXES) {
-    const { answer, touchesBox } = search(rows, c, box);
+    const { answer, touchesBox } = search(rows, c, box, start);
     outcome = answer;
     if (!touchesBox) return answer;
   }
   return outcome;
 }
 
-function search(rows: Rows, c: readonly number[], box: number): { answer: SimplexOutcome; touchesBox: boolean } {
+function search(
+  rows: Rows,
+  c: readonly number[],
+  box: number,
+  start?: readonly Multiplier[],
+): { answer: SimplexOutcome; touchesBox: boolean } {
   const d = rows.unknowns;
   // basis rows: 0 … count − 1 are real ones, −1 − i is the side of the box that bounds unknown i
   const basis = new Int32Array(d);
@@ -74,8 +83,9 @@ function search(rows: Rows, c: readonly number[], box: number): { answer: Simple
     matrix[i * d + i] = (c[i] as number) < 0 ? -1 : 1;
     right[i] = -box;
   }
+  if (start?.length === d) beginFrom(start, rows, c, { basis, matrix, right, inverse });
   for (let exchange = 0; exchange < MOST_EXCHANGES; exchange++) {
-    invert(matrix, inverse, d);
+    if (!invert(matrix, inverse, d)) throw new UndecidedError('two hinges of the search fell together');
     for (let i = 0; i < d; i++) {
       let si = 0;
       let yi = 0;
@@ -103,6 +113,40 @@ function search(rows: Rows, c: readonly number[], box: number): { answer: Simple
     right[leaving] = rows.b[entering] as number;
   }
   throw new UndecidedError('the hinge search did not settle');
+}
+
+/** A starting basis whose multipliers fall below this share of the largest is not trusted. */
+const CLEARLY_POSITIVE = 1e-7;
+
+/** Puts the rows of `start` into the basis if they are independent and their multipliers clearly positive. */
+function beginFrom(
+  start: readonly Multiplier[],
+  rows: Rows,
+  c: readonly number[],
+  to: { basis: Int32Array; matrix: Float64Array; right: Float64Array; inverse: Float64Array },
+): void {
+  const d = rows.unknowns;
+  const trial = new Float64Array(d * d);
+  for (let i = 0; i < d; i++) {
+    const { row } = start[i] as Multiplier;
+    if (row >= rows.count) return;
+    for (let k = 0; k < d; k++) trial[i * d + k] = rows.a[row * d + k] as number;
+  }
+  if (!invert(trial, to.inverse, d)) return;
+  let least = Infinity;
+  let largest = 0;
+  for (let i = 0; i < d; i++) {
+    let y = 0;
+    for (let k = 0; k < d; k++) y += (c[k] as number) * (to.inverse[k * d + i] as number);
+    least = Math.min(least, y);
+    largest = Math.max(largest, y);
+  }
+  if (!(least > CLEARLY_POSITIVE * largest)) return;
+  to.matrix.set(trial);
+  start.forEach(({ row }, i) => {
+    to.basis[i] = row;
+    to.right[i] = rows.b[row] as number;
+  });
 }
 
 /** The row that s violates most, or −1. */
@@ -205,8 +249,8 @@ function refine(matrix: Float64Array, right: Float64Array, inverse: Float64Array
   }
 }
 
-/** Gauss–Jordan with partial pivoting, for matrices of three to five rows. */
-function invert(matrix: Float64Array, inverse: Float64Array, d: number): void {
+/** Gauss–Jordan with partial pivoting, for matrices of three to five rows; false when the rows depend on each other. */
+function invert(matrix: Float64Array, inverse: Float64Array, d: number): boolean {
   const work = SCRATCH;
   for (let i = 0; i < d * d; i++) work[i] = matrix[i] as number;
   inverse.fill(0);
@@ -217,7 +261,7 @@ function invert(matrix: Float64Array, inverse: Float64Array, d: number): void {
       if (Math.abs(work[r * d + column] as number) > Math.abs(work[pivotRow * d + column] as number)) pivotRow = r;
     }
     const pivot = work[pivotRow * d + column] as number;
-    if (pivot === 0) throw new UndecidedError('two hinges of the search fell together');
+    if (pivot === 0) return false;
     if (pivotRow !== column) {
       swapRows(work, column, pivotRow, d);
       swapRows(inverse, column, pivotRow, d);
@@ -235,6 +279,7 @@ function invert(matrix: Float64Array, inverse: Float64Array, d: number): void {
       }
     }
   }
+  return true;
 }
 
 const SCRATCH = new Float64Array(25);

@@ -5,7 +5,7 @@
  * N²/(b v), v = N t − 2|m|, is convex in the state, so the least is closed in on by its tangent planes (Kelley 1960;
  * from memory): the last programme's value is a bound from below, the state's own stress one from above.
  */
-import { minimise } from './hinge-simplex.ts';
+import { minimise, type Multiplier } from './hinge-simplex.ts';
 import { jointLengths, momentForms, normalForms } from './joint-forms.ts';
 import { valueAt } from './ratio.ts';
 import { lineRows } from './rows.ts';
@@ -82,9 +82,11 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
   let best = Float64Array.from({ length: 3 }, (_, k) => inside[k] as number);
   let top = worst(best);
   addPlane(best, top.joint);
+  let basis: readonly Multiplier[] = [];
   while (count + length.length < capacity) {
-    const outcome = minimise({ unknowns: 4, count, a, b }, [0, 0, 0, 1]);
+    const outcome = minimise({ unknowns: 4, count, a, b }, [0, 0, 0, 1], basis);
     if (outcome.kind !== 'optimal') break;
+    basis = outcome.basis;
     if (top.stress - (outcome.s[3] as number) <= MET * top.stress) break;
     let trial = outcome.s.slice(0, 3);
     let found = worst(trial);

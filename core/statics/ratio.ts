@@ -42,8 +42,9 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
   let weights = firstWeights;
   let ratio = 1;
   let best: LeastRatio | null = null;
+  let basis: readonly Multiplier[] | undefined;
   for (let trial = 0; trial < TRIALS; trial++) {
-    const outcome = minimise(slackRows(p, q, ratio, weights, hard), [0, 0, 0, 1]);
+    const outcome = minimise(slackRows(p, q, ratio, weights, hard), [0, 0, 0, 1], basis);
     if (outcome.kind === 'infeasible') return best;
     if (outcome.kind === 'unbounded') {
       // the slack falls without end as the thrust grows: below this ratio lies the one that loads no longer matter to
@@ -53,6 +54,7 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
       ratio = best.ratio;
       continue;
     }
+    basis = outcome.basis;
     const attained = ratioOf(p, q, outcome.s);
     if (attained === null) {
       // this state pulls on a joint: only possible while the trial ratio is too small for any state
@@ -74,11 +76,18 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
 
 /**
  * The least slack z with ±p + q + z w ≥ 0 at every joint: not positive where a state of ratio one or less exists,
- * −∞ where it falls without end.
+ * −∞ where it falls without end. `start` is the basis of a neighbouring question.
  */
-export function leastSlack(p: JointForms, q: JointForms, weights: Float64Array): number {
-  const outcome = minimise(slackRows(p, q, 1, weights), [0, 0, 0, 1]);
-  return outcome.kind === 'optimal' ? outcome.value : -Infinity;
+export function leastSlack(
+  p: JointForms,
+  q: JointForms,
+  weights: Float64Array,
+  start?: readonly Multiplier[],
+): { slack: number; basis: readonly Multiplier[] } {
+  const outcome = minimise(slackRows(p, q, 1, weights), [0, 0, 0, 1], start);
+  return outcome.kind === 'optimal'
+    ? { slack: outcome.value, basis: outcome.basis }
+    : { slack: -Infinity, basis: [] };
 }
 
 /** The least ratio of a thrust so great that the loads do not count: the forms without their loads, the q summing to one. */

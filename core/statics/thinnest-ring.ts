@@ -4,6 +4,7 @@
  * that the joints can balance, it is near enough the share less one that a secant closes in within a few trials.
  */
 import type { MiddleShare } from './geometric-safety.ts';
+import type { Multiplier } from './hinge-simplex.ts';
 import { halfMomentForms, jointLengths, momentForms } from './joint-forms.ts';
 import { leastSlack, valueAt } from './ratio.ts';
 import type { RingSystem } from './system.ts';
@@ -25,9 +26,12 @@ export function thinnestRing(
   present: { readonly thickness: number; readonly system: RingSystem; readonly middle: MiddleShare | null },
   thickest: number,
 ): number | null {
+  let basis: readonly Multiplier[] = [];
   const slackAt = (thickness: number): number => {
     const system = systemFor(thickness);
-    return leastSlack(momentForms(system), halfMomentForms(system), weights);
+    const least = leastSlack(momentForms(system), halfMomentForms(system), weights, basis);
+    basis = least.basis;
+    return least.slack;
   };
   const weights = weightsOf(present);
   const thinnest = present.thickness * NO_RING;
