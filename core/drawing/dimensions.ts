@@ -5,7 +5,7 @@
  */
 import type { Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/ring.ts';
-import { put, type Draught } from './draught.ts';
+import { hingedJoints, put, type Draught } from './draught.ts';
 import { heightAt } from './faces.ts';
 import { along, lettering, stroke } from './path.ts';
 import type { Placing } from './places.ts';
@@ -23,14 +23,16 @@ const SPAN_DROP = 10;
 const RING_TAIL = 14;
 
 export function drawDimensions(draught: Draught): void {
-  const lines = [spanLine(draught), ...riseLine(draught), ...heightLine(draught)];
-  const ring = ringLine(draught);
+  const dimensions: Dimension[] = [];
   // All lines first: a figure may not lie on a line that is drawn after it.
-  for (const { paths } of [...lines, ring]) {
-    put(draught, 'dimensions', ...paths);
-    for (const path of paths) draught.places.blockPath(path);
-  }
-  for (const { label, middle } of [...lines, ring]) {
+  const add = (added: Dimension): void => {
+    dimensions.push(added);
+    put(draught, 'dimensions', ...added.paths);
+    for (const path of added.paths) draught.places.blockPath(path);
+  };
+  for (const added of [spanLine(draught), ...riseLine(draught), ...heightLine(draught)]) add(added);
+  add(ringLine(draught));
+  for (const { label, middle } of dimensions) {
     const placed = draught.places.placeSurely(label, middle);
     put(draught, 'dimensions', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
   }
@@ -141,31 +143,38 @@ function heightLine(draught: Draught): Dimension[] {
   return [dimension(draught, foot, head, [foot, head], length(resolved.above.height), aboutField('above.height'))];
 }
 
-/** Across the ring at a haunch, its tail in the opening where the figure has room. */
+/**
+ * Across the ring at a haunch, its tail where the figure has room: in the opening, or outside where the opening has
+ * none. The thickness is the same wherever it is written.
+ */
 function ringLine(draught: Draught): Dimension {
-  const { ring, mm, length, joints, places } = draught;
-  const dimensions = RING_SHARES.map((share) => {
-    const joint = ring.joints[joints[Math.round(share * (joints.length - 1))]!]!;
-    const { intrados, extrados } =
-      draught.resolved.ring.joints === 'radial' ? joint : squareAt(draught, joint.intrados);
-    const inwards = Math.atan2(intrados.y - extrados.y, intrados.x - extrados.x);
-    const tail = along(intrados, inwards, mm(RING_TAIL));
-    const { paths } = dimension(draught, extrados, intrados, [extrados, intrados], '');
-    const text = length(Math.hypot(extrados.x - intrados.x, extrados.y - intrados.y));
-    const label = figurePlaces(
-      draught,
-      along(intrados, inwards, mm(OVERRUN)),
-      tail,
-      text,
-      aboutField('ring.thickness'),
-    );
-    return { paths: [...paths, stroke('dimension', intrados, tail)], label, middle: tail };
-  });
-  return dimensions.find(({ label }) => label.slice(0, 1).some((placing) => places.isFree(placing))) ?? dimensions[0]!;
+  const dimensions = [true, false].flatMap((inside) => RING_SHARES.map((share) => ringLineAt(draught, share, inside)));
+  return (dimensions.find(({ clear }) => clear) ?? dimensions[0]!).dimension;
 }
 
 /** Where along the ring its thickness may be dimensioned, in order of preference. */
 const RING_SHARES = [0.24, 0.3, 0.18, 0.36, 0.76, 0.7, 0.82, 0.64];
+
+function ringLineAt(draught: Draught, share: number, inside: boolean): { dimension: Dimension; clear: boolean } {
+  const { ring, mm, length, joints, places, resolved } = draught;
+  const number = joints[Math.round(share * (joints.length - 1))]!;
+  const joint = ring.joints[number]!;
+  const { intrados, extrados } = resolved.ring.joints === 'radial' ? joint : squareAt(draught, joint.intrados);
+  const [near, far] = inside ? [intrados, extrados] : [extrados, intrados];
+  const outwards = Math.atan2(near.y - far.y, near.x - far.x);
+  const tail = along(near, outwards, mm(RING_TAIL));
+  const { paths } = dimension(draught, far, near, [far, near], '');
+  const text = length(Math.hypot(extrados.x - intrados.x, extrados.y - intrados.y));
+  const start = along(near, outwards, mm(OVERRUN));
+  const label = figurePlaces(draught, start, tail, text, aboutField('ring.thickness'));
+  return {
+    dimension: { paths: [...paths, stroke('dimension', near, tail)], label, middle: tail },
+    clear:
+      !hingedJoints(draught).has(number) &&
+      places.isClear([along(near, outwards, mm(GAP)), tail]) &&
+      label.slice(0, 1).every((first) => places.isFree(first)),
+  };
+}
 
 /** The thickness square to the soffit at one of its points, for a ring whose joints stand plumb. */
 function squareAt({ resolved, soffit }: Draught, intrados: Point): Joint {

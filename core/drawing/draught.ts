@@ -72,3 +72,10 @@ const CLOSEST_JOINTS = 0.8;
 
 export const put = (draught: Draught, layer: LayerName, ...items: readonly SceneItem[]): void =>
   addItems(draught.items, layer, ...items);
+
+/** Joints at which some state of the ring hinges. */
+export function hingedJoints({ result }: AssessedScheme): ReadonlySet<number> {
+  const { least, greatest } = result.thrust;
+  const hinges = [...(least?.hinges ?? []), ...(greatest?.hinges ?? []), ...(result.mechanism?.hinges ?? [])];
+  return new Set(hinges.map(({ joint }) => joint));
+}

@@ -7,7 +7,7 @@ import { metres } from '../quantity/figures.ts';
 import type { LengthText } from './draught.ts';
 import { elevation } from './elevation.ts';
 import type { Box } from './extent.ts';
-import { drawCautions, drawingZone, VIEW_TITLE } from './layout.ts';
+import { drawCautions, drawingZone, footHeight, VIEW_TITLE } from './layout.ts';
 import { insideFrame, paper, PAPER_NAMES, SCALES, type PaperName, type Scale } from './papers.ts';
 import { lettering, rectangle } from './path.ts';
 import { scaleBar } from './scale-bar.ts';
@@ -59,7 +59,7 @@ function composed(assessed: AssessedScheme, title: SheetTitle, options: SheetOpt
   addItems(items, 'frame', rectangle('frame', left, bottom, right - left, top - bottom));
   const units = options.units ?? 'm, kN';
   const block = { ...title, scale: `${scale.name} on ${paper.name}`, units, documentType: 'Elevation' };
-  drawTitleBlock(items, block, right, bottom);
+  drawTitleBlock(items, block, right, bottom, footHeight(paper, assessed));
   drawCautions(items, assessed, paper);
   drawViewTitle(items, scale, zone);
   const complete = drawSideColumn(items, assessed, paper, {

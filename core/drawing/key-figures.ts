@@ -1,9 +1,9 @@
 /** The findings beside the elevation: what follows from it in figures, the checks, and what it was computed from. */
 import type { AssessedScheme } from '../assess/assess.ts';
-import type { SchemeAssessment } from '../assess/assessment.ts';
+import type { SchemeAssessment, Status } from '../assess/assessment.ts';
 import type { ResolvedScheme } from '../job/defaults.ts';
 import { figure } from '../quantity/figures.ts';
-import type { Column } from './column.ts';
+import { paragraphHeight, type Column } from './column.ts';
 import type { LengthText } from './draught.ts';
 import { entered } from './entered.ts';
 import { lettering } from './path.ts';
@@ -53,31 +53,34 @@ function given({ ring, masonry, above, breadth, sway }: ResolvedScheme, length: 
 
 const kilonewtons = (value: number): string => `${figure(value)} kN`;
 
+/** What fails comes first, so that what finds no room is what holds. */
+const ORDER: readonly Status[] = ['fails', 'narrow', 'unknown', 'holds'];
+
 /** Each check with its mark and its word, and the reason in small lettering where there is room for it. */
-export function drawChecks(column: Column, { checks }: SchemeAssessment): void {
+export function drawChecks(column: Column, result: SchemeAssessment): void {
+  const checks = [...result.checks].sort((a, b) => ORDER.indexOf(a.status) - ORDER.indexOf(b.status));
   column.heading('figures', 'Checks');
   for (const [i, { title, status, because }] of checks.entries()) {
-    if (column.room < 2 * CHECK_ROW && i < checks.length - 1) {
-      column.paragraph('figures', `and ${checks.length - i} more`, { height: 1.8, role: 'text-quiet' });
+    const left = checks.length - i;
+    if (column.room < (left === 1 ? CHECK_ROW : 2 * CHECK_ROW)) {
+      column.complete = false;
+      column.paragraph('figures', `and ${left} more, see the findings`, QUIET);
       return;
     }
-    const centre = { x: column.left + 1.6, y: column.top - 1.9 };
-    column.put('figures', ...statusMark(status, centre, 2.6));
-    const word = lettering(
-      status,
-      { x: column.left + column.width, y: column.top - 3.1 },
-      { height: 2.5, role: STATUS_ROLES[status], align: 'end' },
-    );
+    const baseline = column.top - 3.1;
+    const word = { height: 2.5, role: STATUS_ROLES[status], align: 'end' } as const;
     const room = column.width - INDENT - textWidth(status, 2.5) - 2;
-    const name = lettering(cutToWidth(plainText(title), room, 2.5), { x: column.left + INDENT, y: column.top - 3.1 });
-    column.put('figures', word, name);
+    column.put('figures', ...statusMark(status, { x: column.left + 1.6, y: column.top - 1.9 }, 2.6));
+    column.put('figures', lettering(status, { x: column.left + column.width, y: baseline }, word));
+    column.put('figures', lettering(cutToWidth(plainText(title), room, 2.5), { x: column.left + INDENT, y: baseline }));
     column.space(CHECK_ROW);
-    if (column.room > CHECK_ROW * (checks.length - i))
-      column.paragraph('figures', because, { height: 1.8, role: 'text-quiet' }, INDENT);
-    column.space(0.6);
+    const reason = paragraphHeight(because, column.width - INDENT, 1.8);
+    if (column.room - reason >= CHECK_ROW * (left - 1)) column.paragraph('figures', because, QUIET, INDENT);
+    else column.complete = false;
   }
 }
 
+const QUIET = { height: 1.8, role: 'text-quiet' } as const;
 /** mm */
-const CHECK_ROW = 4.4;
+const CHECK_ROW = 4.6;
 const INDENT = 5;

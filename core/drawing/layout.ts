@@ -26,14 +26,14 @@ const cautionsOf = ({ result }: AssessedScheme) => ({
   standing: standingCautions,
 });
 
-function footHeight(paper: Paper, assessed: AssessedScheme): number {
+export function footHeight(paper: Paper, assessed: AssessedScheme): number {
   const { raised, standing } = cautionsOf(assessed);
   const width = cautionsWidth(paper);
   const lines = [...raised, ...standing].reduce(
     (sum, text) => sum + paragraphHeight(text, width - BULLET, CAUTION_LETTERS),
     0,
   );
-  return Math.max(TITLE_BLOCK.height, lines + 12);
+  return Math.max(TITLE_BLOCK.leastHeight, lines + 10);
 }
 
 const BULLET = 3.5;
@@ -54,11 +54,6 @@ export function drawCautions(items: Items, assessed: AssessedScheme, paper: Pape
   const top = inside.bottom + footHeight(paper, assessed);
   const titleLeft = inside.right - TITLE_BLOCK.width;
   addItems(items, 'frame', stroke('rule', { x: inside.left, y: top }, { x: titleLeft, y: top }));
-  addItems(
-    items,
-    'frame',
-    stroke('rule', { x: titleLeft, y: top }, { x: titleLeft, y: inside.bottom + TITLE_BLOCK.height }),
-  );
   const column = new Column(items, inside.left + PAD, cautionsWidth(paper), top - 2.5, inside.bottom);
   column.heading('cautions', 'Cautions');
   for (const text of raised) column.paragraph('cautions', text, { height: CAUTION_LETTERS }, BULLET, '▲');

@@ -13,7 +13,7 @@ const SWATCH = 14;
 const ROW = 4.4;
 const HEADING = 6;
 
-interface Entry {
+export interface LegendEntry {
   readonly words: string;
   /** Drawn in a box SWATCH wide and ROW high round the origin. */
   readonly swatch: readonly SceneItem[];
@@ -21,7 +21,7 @@ interface Entry {
 
 /** Room that the legend needs, mm. */
 export const legendHeight = (scheme: ResolvedScheme, assessment: SchemeAssessment): number =>
-  HEADING + ROW * entriesOf(scheme, assessment).length;
+  HEADING + ROW * legendEntries(scheme, assessment).length;
 
 export function drawLegend(
   column: Column,
@@ -29,7 +29,7 @@ export function drawLegend(
   assessment: SchemeAssessment,
   letters: Lettering,
 ): void {
-  const entries = entriesOf(scheme, assessment);
+  const entries = legendEntries(scheme, assessment);
   column.heading('legend', 'Legend');
   for (const { words, swatch } of entries) {
     const centre = { x: column.left + SWATCH / 2, y: column.top - ROW / 2 };
@@ -42,7 +42,10 @@ export function drawLegend(
   }
 }
 
-function entriesOf({ loads }: ResolvedScheme, { thrust, reactions, mechanism }: SchemeAssessment): Entry[] {
+export function legendEntries(
+  { loads }: ResolvedScheme,
+  { thrust, reactions, mechanism }: SchemeAssessment,
+): LegendEntry[] {
   const { least, greatest } = thrust;
   const moving = mechanism !== null && mechanism !== undefined && mechanism.hinges.length > 0;
   return [

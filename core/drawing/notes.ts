@@ -1,6 +1,5 @@
 /** Quiet lettering on the elevation: joint numbers and what the wall or fill is. Left out where there is no room. */
-import type { Hinge } from '../assess/assessment.ts';
-import { put, type Draught } from './draught.ts';
+import { hingedJoints, put, type Draught } from './draught.ts';
 import { entered } from './entered.ts';
 import { along, lettering } from './path.ts';
 import type { Placing } from './places.ts';
@@ -51,7 +50,7 @@ function drawJointNumbers(draught: Draught): void {
   const { ring, joints, mm, places } = draught;
   const last = ring.joints.length - 1;
   const every = last <= 12 ? 1 : last <= 40 ? 5 : 10 ** Math.ceil(Math.log10(last / 40));
-  const hinges = new Set(hingesOf(draught).map((hinge) => hinge.joint));
+  const hinges = hingedJoints(draught);
   const wanted = joints.filter((joint) => joint === 0 || joint === last || joint % every === 0 || hinges.has(joint));
   // Hinges first: theirs are the numbers that the findings speak of.
   const ordered = [...wanted.filter((joint) => hinges.has(joint)), ...wanted.filter((joint) => !hinges.has(joint))];
@@ -72,9 +71,4 @@ function drawJointNumbers(draught: Draught): void {
     ]);
     put(draught, 'notes', ...(places.place(placings) ?? []));
   }
-}
-
-function hingesOf({ result }: Draught): readonly Hinge[] {
-  const { least, greatest } = result.thrust;
-  return [...(least?.hinges ?? []), ...(greatest?.hinges ?? []), ...(result.mechanism?.hinges ?? [])];
 }

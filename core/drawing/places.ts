@@ -95,13 +95,17 @@ export class Places {
   }
 
   isFree(placing: Placing): boolean {
-    return placing.every((text) => {
-      const corners = textCorners(text, this.millimetresPerUnit);
-      const box = boxOf(corners) as Box;
-      return this.taken.every(
-        (other) => boxesApart(box, other.box, this.clearance) || apart(corners, other.corners, this.clearance),
-      );
-    });
+    return placing.every((text) => this.isClear(textCorners(text, this.millimetresPerUnit)));
+  }
+
+  /** Whether a convex figure or a line touches nothing that is drawn. */
+  isClear(corners: readonly Point[]): boolean {
+    const box = boxOf(corners);
+    const { clearance } = this;
+    if (box === null) return true;
+    return this.taken.every(
+      (other) => boxesApart(box, other.box, clearance) || apart(corners, other.corners, clearance),
+    );
   }
 
   /** The lines of a label, level, beginning (or ending) just beyond the end of its leader. */

@@ -5,13 +5,12 @@ import type { LengthText } from './draught.ts';
 import { headlineOf } from './elevation.ts';
 import { drawChecks, drawKeyFigures } from './key-figures.ts';
 import { drawLegend, legendHeight } from './legend.ts';
-import { columnWidth, isSmall, PAD } from './layout.ts';
+import { columnWidth, footHeight, isSmall, PAD } from './layout.ts';
 import { insideFrame } from './papers.ts';
 import { stroke } from './path.ts';
 import { addItems, type Items, type KeyEntry, type LayerName } from './scene.ts';
 import type { Paper } from './sheet.ts';
 import { charactersNotInFont, plainText } from './text.ts';
-import { TITLE_BLOCK } from './title-block.ts';
 
 export interface SideColumnOptions {
   /** Explains the numbers on the drawing. */
@@ -32,7 +31,7 @@ export function drawSideColumn(
   const inside = insideFrame(paper);
   const width = columnWidth(paper);
   const left = inside.right - width - PAD;
-  const bottom = inside.bottom + TITLE_BLOCK.height;
+  const bottom = inside.bottom + footHeight(paper, assessed);
   addItems(items, 'frame', stroke('rule', { x: left - PAD, y: inside.top }, { x: left - PAD, y: bottom }));
   const small = isSmall(paper);
   const column = new Column(items, left, width, inside.top - PAD, bottom + 2);

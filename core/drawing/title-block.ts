@@ -21,9 +21,9 @@ export interface TitleBlock {
   readonly surveyedOn: string;
 }
 
-/** mm */
-export const TITLE_BLOCK = { width: 180, height: 36 } as const;
-const ROW = 9;
+/** mm; its rows grow with the height it is given. */
+export const TITLE_BLOCK = { width: 180, leastHeight: 36 } as const;
+const ROWS = 4;
 
 interface Cell {
   readonly label: string;
@@ -33,20 +33,21 @@ interface Cell {
   readonly face?: Face;
 }
 
-/** @param right, bottom its lower right corner in paper mm. */
-export function drawTitleBlock(items: Items, block: TitleBlock, right: number, bottom: number): void {
+/** @param right, bottom its lower right corner, and its height, in paper mm. */
+export function drawTitleBlock(items: Items, block: TitleBlock, right: number, bottom: number, height: number): void {
   const left = right - TITLE_BLOCK.width;
+  const row = height / ROWS;
   addItems(items, 'title', {
-    ...rectangle('ring-edge', left, bottom, TITLE_BLOCK.width, TITLE_BLOCK.height),
+    ...rectangle('ring-edge', left, bottom, TITLE_BLOCK.width, height),
     closed: false,
   });
-  rowsOf(block).forEach((row, i) => {
-    const top = bottom + TITLE_BLOCK.height - i * ROW;
+  rowsOf(block).forEach((cells, i) => {
+    const top = bottom + height - i * row;
     if (i > 0) addItems(items, 'title', stroke('rule', { x: left, y: top }, { x: right, y: top }));
     let x = left;
-    for (const cell of row) {
-      if (x > left) addItems(items, 'title', stroke('rule', { x, y: top }, { x, y: top - ROW }));
-      drawCell(items, cell, x, top);
+    for (const cell of cells) {
+      if (x > left) addItems(items, 'title', stroke('rule', { x, y: top }, { x, y: top - row }));
+      drawCell(items, cell, x, top, row);
       x += cell.width;
     }
   });
@@ -83,6 +84,7 @@ function drawCell(
   { label, value, width, height = 2.5, face = 'regular' }: Cell,
   left: number,
   top: number,
+  row: number,
 ): void {
   const room = width - 3;
   addItems(
@@ -91,7 +93,7 @@ function drawCell(
     lettering(label, { x: left + 1.5, y: top - 2.4 }, { height: 1.8, role: 'text-quiet' }),
     lettering(
       cutToWidth(plainText(value), room, height, face),
-      { x: left + 1.5, y: top - ROW + 1.4 },
+      { x: left + 1.5, y: top - row + 1.4 },
       { height, face },
     ),
   );
