@@ -18,6 +18,7 @@ export const LIMITS = {
   arches: 200,
   schemes: 200,
   loads: 5_000,
+  marks: 5_000,
   points: 20_000,
   text: 20_000,
   /** Any length, m, and any force or intensity, kN. */
@@ -71,11 +72,39 @@ export const profileSchema = v.variant('shape', [
   }),
 ]);
 
+const jointNumber = v.pipe(v.number(), v.integer(), v.minValue(0), v.maxValue(LIMITS.voussoirs));
+
 export const ringSchema = v.looseObject({
   /** Radial thickness, m; at the crown where `springingThickness` differs. */
   thickness: length,
+  /** Thickness at both springings, m; the ring changes evenly along its intrados between them and the crown. */
+  springingThickness: v.optional(length),
   voussoirs: v.optional(v.pipe(v.number(), v.integer(), v.minValue(2), v.maxValue(LIMITS.voussoirs))),
   joints: v.optional(v.picklist(['radial', 'vertical'])),
+  /** Rings of brick or stone laid one over the other; drawn, and taken to act together. */
+  courses: v.optional(v.pipe(v.number(), v.integer(), v.minValue(1), v.maxValue(20))),
+  /** Joints that have lost mortar: the depth from that face carries nothing. Without `joint`, every joint. */
+  lostMortar: v.optional(
+    v.pipe(
+      v.array(
+        v.looseObject({
+          face: v.picklist(['intrados', 'extrados']),
+          depth: length,
+          joint: v.optional(jointNumber),
+        }),
+      ),
+      v.maxLength(LIMITS.marks),
+    ),
+  ),
+});
+
+/** Masonry over the haunches up to a level: weight only, or counted as part of the ring where it backs it. */
+export const backingSchema = v.looseObject({
+  /** Top of the backing over the springing line, m. */
+  level: place,
+  counts: v.picklist(['weight', 'masonry']),
+  /** kN/m³ */
+  unitWeight: v.optional(notNegative(200)),
 });
 
 export const masonrySchema = v.looseObject({
@@ -93,12 +122,29 @@ export const aboveSchema = v.looseObject({
   /** Height over the crown extrados, m. */
   height: v.optional(notNegative(LIMITS.length)),
   unitWeight: v.optional(notNegative(200)),
+  /** Paving, floors, copings on top, bottom layer first. */
+  layers: v.optional(
+    v.pipe(
+      v.array(v.looseObject({ name: v.optional(text), thickness: length, unitWeight: notNegative(200) })),
+      v.maxLength(LIMITS.marks),
+    ),
+  ),
+  /** Holes through what lies above, such as windows: from and to along x, sill and head as heights, m. */
+  openings: v.optional(
+    v.pipe(v.array(v.looseObject({ from: place, to: place, sill: place, head: place })), v.maxLength(LIMITS.marks)),
+  ),
+  /** Horizontal over vertical pressure of the fill on the back of the ring; off where it is not given. */
+  sidePressure: v.optional(notNegative(10)),
 });
+
+/** Permanent or variable, for combinations; variable where it is not said. */
+const action = v.optional(v.picklist(['permanent', 'variable']));
 
 export const loadSchema = v.variant('kind', [
   v.looseObject({
     id,
     name: v.optional(text),
+    action,
     kind: v.literal('point'),
     x: place,
     /** kN, downwards, on the whole breadth. */
@@ -107,13 +153,55 @@ export const loadSchema = v.variant('kind', [
   v.looseObject({
     id,
     name: v.optional(text),
+    action,
     kind: v.literal('strip'),
     from: place,
     to: place,
     /** kN/m² on the whole breadth, downwards. */
     intensity: within(LIMITS.force),
   }),
+  v.looseObject({
+    id,
+    name: v.optional(text),
+    action,
+    kind: v.literal('axle'),
+    /** Middle of the axle at the top of what lies above, m. */
+    x: place,
+    /** kN on the whole breadth, downwards. */
+    force: within(LIMITS.force),
+    /** Length of the wheels' print along the span, m. */
+    patch: v.optional(notNegative(LIMITS.length)),
+    /** How far the load spreads to each side for each metre down through the fill. */
+    dispersal: v.optional(notNegative(5)),
+  }),
 ]);
+
+/** Loads taken together with factors; a load's own factor goes before that of its action. */
+export const combinationSchema = v.looseObject({
+  id,
+  name: v.optional(text),
+  /** Factor on masonry, fill and permanent loads. */
+  permanent: v.optional(notNegative(100)),
+  /** Factor on variable loads. */
+  variable: v.optional(notNegative(100)),
+  factors: v.optional(
+    v.pipe(v.array(v.looseObject({ load: id, factor: notNegative(100) })), v.maxLength(LIMITS.loads)),
+  ),
+});
+
+/** An opening seen at a joint of the ring. Its place: the joint's number, or its share of the way along the intrados. */
+export const crackSchema = v.looseObject({
+  id,
+  joint: v.optional(jointNumber),
+  along: v.optional(v.pipe(v.number(), v.finite(), v.minValue(0), v.maxValue(1))),
+  /** The face at which it gapes. */
+  face: v.picklist(['intrados', 'extrados']),
+  /** m */
+  width: v.optional(notNegative(LIMITS.length)),
+  /** Date on which it was seen, year-month-day. */
+  seenOn: v.optional(text),
+  notes: v.optional(text),
+});
 
 export const supportSchema = v.looseObject({ kind: v.picklist(['rigid']) });
 
@@ -126,10 +214,13 @@ export const schemeSchema = v.looseObject({
   breadth: length,
   masonry: v.optional(masonrySchema),
   above: v.optional(aboveSchema),
+  backing: v.optional(backingSchema),
   loads: v.optional(v.pipe(v.array(loadSchema), v.maxLength(LIMITS.loads))),
   /** Horizontal acceleration as a share of gravity, + to the right. */
   sway: v.optional(within(10)),
   supports: v.optional(v.looseObject({ left: v.optional(supportSchema), right: v.optional(supportSchema) })),
+  combinations: v.optional(v.pipe(v.array(combinationSchema), v.maxLength(LIMITS.marks))),
+  cracks: v.optional(v.pipe(v.array(crackSchema), v.maxLength(LIMITS.marks))),
   /** What the assessor asks for beyond standing; a ring that holds with less is called narrow. */
   asked: v.optional(v.looseObject({ geometricSafety: v.optional(v.pipe(finite, v.minValue(1), v.maxValue(100))) })),
 });
@@ -172,5 +263,8 @@ export type ProfileShape = Profile['shape'];
 export type Ring = Deep<v.InferOutput<typeof ringSchema>>;
 export type Masonry = Deep<v.InferOutput<typeof masonrySchema>>;
 export type Above = Deep<v.InferOutput<typeof aboveSchema>>;
+export type Backing = Deep<v.InferOutput<typeof backingSchema>>;
+export type Combination = Deep<v.InferOutput<typeof combinationSchema>>;
+export type Crack = Deep<v.InferOutput<typeof crackSchema>>;
 export type Load = Deep<v.InferOutput<typeof loadSchema>>;
 export type Support = Deep<v.InferOutput<typeof supportSchema>>;

@@ -2,7 +2,7 @@
 import { LIMITS } from '../schema.ts';
 import type { Load, Scheme } from '../schema.ts';
 import { nextId } from './ids.ts';
-import { held, patched } from './patch.ts';
+import { held, patched, unlessSame } from './patch.ts';
 import type { Patch } from './patch.ts';
 import { SMALLEST } from './shapes.ts';
 
@@ -71,7 +71,7 @@ function withLoad(scheme: Scheme, loadId: string, edit: (load: Load) => Load): S
   const loads = scheme.loads ?? [];
   const before = loads.find(({ id }) => id === loadId);
   if (before === undefined) return scheme;
-  const after = patched(before, edit(before));
+  const after = unlessSame(before, edit(before));
   return after === before ? scheme : patched(scheme, { loads: loads.map((load) => (load === before ? after : load)) });
 }
 

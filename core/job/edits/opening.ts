@@ -7,7 +7,7 @@
  */
 import { LIMITS } from '../schema.ts';
 import type { Profile, ProfileShape, Scheme } from '../schema.ts';
-import { held, patched } from './patch.ts';
+import { held, patched, unlessSame } from './patch.ts';
 import { PROFILE_FIELDS, SMALLEST, drawnProfile, settledProfile, usualProfile } from './shapes.ts';
 
 export interface BoardPoint {
@@ -19,7 +19,7 @@ export interface BoardPoint {
 export type DrawnShape = Exclude<ProfileShape, 'measured'>;
 
 function withProfile(scheme: Scheme, profile: Profile): Scheme {
-  return patched(scheme, { profile: patched(scheme.profile, profile) });
+  return patched(scheme, { profile: unlessSame(scheme.profile, profile) });
 }
 
 /** Span between the springings of any profile, m. */

@@ -14,6 +14,14 @@ export function patched<T extends object>(object: T, patch: Patch<T>): T {
   return after as T;
 }
 
+/** `after`, or `before` itself where both have the same fields. */
+export function unlessSame<T extends object>(before: T, after: T): T {
+  const fields = Object.entries(after);
+  const old = before as Readonly<Record<string, unknown>>;
+  const isSame = fields.length === Object.keys(before).length && fields.every(([field, value]) => old[field] === value);
+  return isSame ? before : after;
+}
+
 /** A number held between two limits; `otherwise` where it is not a finite number. Never minus zero. */
 export function held(value: number, least: number, most: number, otherwise: number): number {
   return Number.isFinite(value) ? Math.min(Math.max(value, least), most) + 0 : otherwise;
