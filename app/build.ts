@@ -40,7 +40,8 @@ export function buildIsStale(projectFolder: string): boolean {
   } catch {
     return true;
   }
-  return SOURCES.some((name) => newest(join(projectFolder, name)) >= began);
+  // Written so that a stamp that is no number counts as none.
+  return !SOURCES.every((name) => newest(join(projectFolder, name)) < began);
 }
 
 /** Time of the latest change at or under `path`, ms; a folder changes when something in it comes or goes. */
