@@ -26,7 +26,7 @@ const SHAPES: Record<ProfileShape, (span: number) => fc.Arbitrary<Profile>> = {
   parabolic: (span) => between(0.1, 0.8).map((share) => ({ shape: 'parabolic', span, rise: share * span })),
   catenary: (span) => between(0.1, 0.8).map((share) => ({ shape: 'catenary', span, rise: share * span })),
   flat: (span) =>
-    fc.tuple(between(50, 85), between(0, 0.03), fc.boolean()).map(([skewbackAngle, camber, level]) => ({
+    fc.tuple(between(50, 85), between(0.001, 0.03), fc.boolean()).map(([skewbackAngle, camber, level]) => ({
       shape: 'flat',
       span,
       skewbackAngle,
