@@ -10,35 +10,51 @@ export interface Box {
   readonly top: number;
 }
 
-export function boxOf(points: readonly Point[]): Box | null {
-  if (points.length === 0) return null;
-  let [left, bottom, right, top] = [Infinity, Infinity, -Infinity, -Infinity];
-  for (const { x, y } of points) {
-    left = Math.min(left, x);
-    right = Math.max(right, x);
-    bottom = Math.min(bottom, y);
-    top = Math.max(top, y);
+/** Grows round point after point. */
+export class Extent {
+  private left = Infinity;
+  private bottom = Infinity;
+  private right = -Infinity;
+  private top = -Infinity;
+
+  add({ x, y }: Point): void {
+    if (x < this.left) this.left = x;
+    if (x > this.right) this.right = x;
+    if (y < this.bottom) this.bottom = y;
+    if (y > this.top) this.top = y;
   }
-  return { left, bottom, right, top };
+
+  /** Null while there is nothing in it. */
+  box(): Box | null {
+    const { left, bottom, right, top } = this;
+    return left <= right ? { left, bottom, right, top } : null;
+  }
+}
+
+export function boxOf(points: readonly Point[]): Box | null {
+  const extent = new Extent();
+  for (const point of points) extent.add(point);
+  return extent.box();
 }
 
 /** Start, ends of edges, and the points where an arc reaches furthest. */
 export function pathPoints(path: { readonly start: Point; readonly edges: readonly Edge[] }): Point[] {
-  return [
-    path.start,
-    ...path.edges.flatMap((edge) => (edge.kind === 'line' ? [edge.to] : [...arcExtremes(edge), edge.to])),
-  ];
-}
-
-function arcExtremes({ centre, radius, from, turn }: Extract<Edge, { kind: 'arc' }>): Point[] {
-  const low = Math.min(from, from + turn);
-  const high = Math.max(from, from + turn);
-  const points: Point[] = [];
-  for (let quarter = Math.ceil(low / (Math.PI / 2)); quarter * (Math.PI / 2) <= high; quarter++) {
-    const angle = (quarter * Math.PI) / 2;
-    points.push({ x: centre.x + radius * Math.cos(angle), y: centre.y + radius * Math.sin(angle) });
+  const points = [path.start];
+  for (const edge of path.edges) {
+    if (edge.kind === 'arc') addArcExtremes(points, edge);
+    points.push(edge.to);
   }
   return points;
+}
+
+const QUARTER = Math.PI / 2;
+
+function addArcExtremes(points: Point[], { centre, radius, from, turn }: Extract<Edge, { kind: 'arc' }>): void {
+  const high = Math.max(from, from + turn);
+  for (let quarter = Math.ceil(Math.min(from, from + turn) / QUARTER); quarter * QUARTER <= high; quarter++) {
+    const angle = quarter * QUARTER;
+    points.push({ x: centre.x + radius * Math.cos(angle), y: centre.y + radius * Math.sin(angle) });
+  }
 }
 
 export interface Lettered {

@@ -59,8 +59,8 @@ export function planLoads(draught: Draught): LoadPlan {
 
 /** Name and amount, as in `beam end: 12 kN`. */
 export function labelOf(load: ResolvedLoad): string {
-  const amount = load.kind === 'point' ? load.force : load.intensity;
-  const text = `${entered(Math.abs(amount))} ${load.kind === 'point' ? 'kN' : 'kN/m²'}${amount < 0 ? ' upwards' : ''}`;
+  const amount = load.kind === 'strip' ? load.intensity : load.force;
+  const text = `${entered(Math.abs(amount))} ${load.kind === 'strip' ? 'kN/m²' : 'kN'}${amount < 0 ? ' upwards' : ''}`;
   const name = cutToWidth(plainText(load.name), LONGEST_NAME, LETTERS);
   return name === '' ? text : `${name}: ${text}`;
 }
@@ -68,7 +68,7 @@ export function labelOf(load: ResolvedLoad): string {
 function heaviest(loads: readonly ResolvedLoad[]): readonly ResolvedLoad[] {
   if (loads.length <= MOST_LOADS) return loads;
   const size = (load: ResolvedLoad): number =>
-    Math.abs(load.kind === 'point' ? load.force : load.intensity * (load.to - load.from));
+    Math.abs(load.kind === 'strip' ? load.intensity * (load.to - load.from) : load.force);
   const chosen = new Set([...loads].sort((a, b) => size(b) - size(a)).slice(0, MOST_LOADS));
   return loads.filter((load) => chosen.has(load));
 }
@@ -82,7 +82,7 @@ interface Row {
 function inRows(loads: readonly ResolvedLoad[], gap: number): Row[] {
   const strips: { load: StripLoad; row: number }[] = [];
   return loads.flatMap((load): Row[] => {
-    if (load.kind === 'point') return [{ load, row: 0 }];
+    if (load.kind !== 'strip') return [{ load, row: 0 }];
     const clashes = strips.filter(({ load: other }) => load.from < other.to + gap && other.from < load.to + gap);
     let row = 0;
     while (clashes.some((other) => other.row === row)) row++;
@@ -115,7 +115,7 @@ function labelled(draught: Draught, rows: readonly Row[], textOf: (load: Resolve
 
 /** Over a point load, at the outer end of a strip. */
 function poleOf(load: ResolvedLoad, middle: number): number {
-  if (load.kind === 'point') return load.x;
+  if (load.kind !== 'strip') return load.x;
   return (load.from + load.to) / 2 < middle ? load.from : load.to;
 }
 

@@ -75,7 +75,7 @@ function drawLabel(draught: Draught, placed: PlacedLoad, lowestTop: number): voi
     return;
   }
   const top = { x: pole, y: lowestTop + mm((tier ?? 0) * FLAG_HEIGHT) };
-  if (load.kind === 'point') {
+  if (load.kind !== 'strip') {
     putPaths(draught, pointLoad(draught, top, { x: pole, y: surfaceAt(draught, pole) }, load.force, about));
   } else if (tier !== null) {
     putPaths(draught, [stroke('load-leader', top, { x: pole, y: barOf(draught, row) }, about)]);

@@ -9,7 +9,7 @@
  */
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
-import { boxOf, textCorners, pathPoints, type Box } from './extent.ts';
+import { Extent, pathPoints, textCorners, type Box } from './extent.ts';
 import type { Role } from './style.ts';
 import type { Face } from './text.ts';
 
@@ -118,12 +118,11 @@ export function makeScene(head: SceneHead, items: Items, key: readonly KeyEntry[
     const list = items.get(name) ?? [];
     return list.length === 0 ? [] : [{ name, items: list }];
   });
-  return {
-    ...head,
-    layers,
-    key,
-    bounds: boxOf(layers.flatMap((layer) => layer.items.flatMap((item) => itemPoints(item, head.millimetresPerUnit)))),
-  };
+  const extent = new Extent();
+  for (const { items: drawn } of layers) {
+    for (const item of drawn) for (const point of itemPoints(item, head.millimetresPerUnit)) extent.add(point);
+  }
+  return { ...head, layers, key, bounds: extent.box() };
 }
 
 /** Points whose box is the item's box. */
