@@ -47,9 +47,9 @@ const scaledAbove = (above: Above, k: number): Above => ({ ...above, height: (ab
 
 /** Lengths in the plane times k, masonry the same: its weights grow as k², and loads are made to. */
 const scaledLoad = (load: Load, k: number): Load =>
-  load.kind === 'point'
-    ? { ...load, x: load.x * k, force: load.force * k * k }
-    : { ...load, from: load.from * k, to: load.to * k, intensity: load.intensity * k };
+  load.kind === 'strip'
+    ? { ...load, from: load.from * k, to: load.to * k, intensity: load.intensity * k }
+    : { ...load, x: load.x * k, force: load.force * k * k };
 
 function scaledScheme(scheme: Scheme, k: number): Scheme {
   return {
@@ -75,7 +75,7 @@ describe('scale', () => {
     fc.assert(
       fc.property(anyScheme, between(0.1, 8), (scheme, k) => {
         const loads = (scheme.loads ?? []).map((load) =>
-          load.kind === 'point' ? { ...load, force: load.force * k } : load,
+          load.kind === 'strip' ? load : { ...load, force: load.force * k },
         );
         expectSame(assessed(scheme), assessed({ ...scheme, breadth: scheme.breadth * k, loads }), k);
       }),
@@ -91,7 +91,7 @@ describe('scale', () => {
           masonry: { unitWeight: (scheme.masonry?.unitWeight ?? 0) * c },
           ...(scheme.above ? { above: { ...scheme.above, unitWeight: (scheme.above.unitWeight ?? 0) * c } } : {}),
           loads: (scheme.loads ?? []).map((load) =>
-            load.kind === 'point' ? { ...load, force: load.force * c } : { ...load, intensity: load.intensity * c },
+            load.kind === 'strip' ? { ...load, intensity: load.intensity * c } : { ...load, force: load.force * c },
           ),
         };
         expectSame(assessed(scheme), assessed(heavier), c);
@@ -110,7 +110,7 @@ describe('hand', () => {
     ...scheme,
     profile: mirroredProfile(scheme.profile),
     loads: (scheme.loads ?? []).map((load) =>
-      load.kind === 'point' ? { ...load, x: -load.x } : { ...load, from: -load.to, to: -load.from },
+      load.kind === 'strip' ? { ...load, from: -load.to, to: -load.from } : { ...load, x: -load.x },
     ),
     sway: -(scheme.sway ?? 0),
   });
@@ -153,19 +153,19 @@ describe('manner of entry', () => {
     fc.assert(
       fc.property(anyScheme, between(0.05, 0.95), (scheme, share) => {
         const loads = (scheme.loads ?? []).flatMap((load): Load[] =>
-          load.kind === 'point'
+          load.kind === 'strip'
             ? [
-                { ...load, force: load.force * share },
-                { ...load, id: `${load.id}b`, force: load.force * (1 - share) },
-              ]
-            : [
                 { ...load, to: load.from + share * (load.to - load.from) },
                 { ...load, id: `${load.id}b`, from: load.from + share * (load.to - load.from) },
+              ]
+            : [
+                { ...load, force: load.force * share },
+                { ...load, id: `${load.id}b`, force: load.force * (1 - share) },
               ],
         );
         // a part of a strip may lie wholly beside the arch, which is refused
         const reach = Math.max(...assessed(scheme).model.joints.map(({ extrados }) => extrados.x));
-        fc.pre(loads.every((load) => load.kind === 'point' || load.from < reach * 0.95));
+        fc.pre(loads.every((load) => load.kind !== 'strip' || load.from < reach * 0.95));
         expectSame(assessed(scheme), assessed({ ...scheme, loads }));
       }),
       RUNS,
