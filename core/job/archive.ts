@@ -18,7 +18,7 @@ import { checkSum, checkSumsOf } from './zip-check.ts';
 const JOB_NAME = 'job.json';
 
 /** What one archive may hold. A photograph of 64 MB is beyond any camera's compressed file. */
-export const ARCHIVE_LIMITS = {
+const ARCHIVE_LIMITS = {
   entries: 2_000,
   /** Bytes unpacked, of one file and of all. */
   file: 64 * 1024 * 1024,

@@ -6,8 +6,10 @@
 import { rightFor } from './fields.ts';
 import { underPath } from './problem.ts';
 import type { Problem } from './problem.ts';
-import type { Arch, Job, Load, Profile, Scheme } from './schema.ts';
+import type { Above, Arch, Job, Load, Profile, Scheme } from './schema.ts';
 import { shown } from './shown.ts';
+
+type Opening = NonNullable<Above['openings']>[number];
 
 /** Names that the assessment gives to forces which come from no load. */
 const RESERVED_LOAD_IDS = ['self-weight', 'above', 'sway'];
@@ -15,9 +17,9 @@ const RESERVED_LOAD_IDS = ['self-weight', 'above', 'sway'];
 /** Problems between fields of a job that has passed the schema; empty when there are none. */
 export function relationProblems(job: Job): Problem[] {
   return [
-    ...dateProblems(job.site?.surveyedOn),
+    ...underPath('site', dateProblems('surveyedOn', job.site?.surveyedOn)),
     ...repeatedIds('arches', job.arches),
-    ...job.arches.flatMap((arch, index) => underPath(`arches[${index}]`, archProblems(arch))),
+    ...each('arches', job.arches, archProblems),
   ];
 }
 
@@ -30,14 +32,25 @@ function archProblems(arch: Arch): Problem[] {
   ];
 }
 
-/** The same for one scheme by itself, paths from the scheme's root. */
-export function schemeProblems(scheme: Scheme): Problem[] {
-  const loads = scheme.loads ?? [];
+function schemeProblems(scheme: Scheme): Problem[] {
+  const { profile, above, loads = [], combinations = [], cracks = [] } = scheme;
   return [
-    ...profileProblems(scheme.profile),
+    ...profileProblems(profile),
+    ...each('above.openings', above?.openings ?? [], openingProblems),
     ...repeatedIds('loads', loads),
-    ...loads.flatMap((load, index) => underPath(`loads[${index}]`, loadProblems(load))),
+    ...each('loads', loads, loadProblems),
+    ...repeatedIds('combinations', combinations),
+    ...each('combinations', combinations, ({ factors = [] }) =>
+      each('factors', factors, ({ load }) => unknownLoad(load, loads)),
+    ),
+    ...repeatedIds('cracks', cracks),
+    ...each('cracks', cracks, ({ seenOn }) => dateProblems('seenOn', seenOn)),
   ];
+}
+
+/** The problems of every entry of a list, each under its place in it. */
+function each<T>(list: string, entries: readonly T[], problemsOf: (entry: T) => Problem[]): Problem[] {
+  return entries.flatMap((entry, index) => underPath(`${list}[${index}]`, problemsOf(entry)));
 }
 
 function roleProblems(scheme: Scheme, index: number): Problem[] {
@@ -86,15 +99,27 @@ function loadProblems(load: Load): Problem[] {
       right: 'choose another, such as "l1"',
     });
   }
-  if (load.kind === 'strip' && !(load.from < load.to)) {
-    problems.push({
-      path: 'to',
-      value: shown(load.to),
-      wrong: 'a strip ends to the right of where it begins',
-      right: `give metres above ${load.from}`,
-    });
-  }
+  if (load.kind === 'strip')
+    problems.push(...notAbove('to', load.to, load.from, 'a strip ends to the right of where it begins'));
   return problems;
+}
+
+function openingProblems({ from, to, sill, head }: Opening): Problem[] {
+  return [
+    ...notAbove('to', to, from, 'an opening ends to the right of where it begins'),
+    ...notAbove('head', head, sill, 'the head of an opening is above its sill'),
+  ];
+}
+
+function notAbove(path: string, value: number, limit: number, wrong: string): Problem[] {
+  return value > limit ? [] : [{ path, value: shown(value), wrong, right: `give metres above ${limit}` }];
+}
+
+function unknownLoad(id: string, loads: readonly Load[]): Problem[] {
+  if (loads.some((load) => load.id === id)) return [];
+  const ids = loads.slice(0, 6).map((load) => shown(load.id));
+  const right = ids.length === 0 ? 'add the load or take the factor out' : `write ${ids.join(' or ')}`;
+  return [{ path: 'load', value: shown(id), wrong: 'no load of this scheme has this id', right }];
 }
 
 function repeatedIds(list: string, entries: readonly { readonly id: string }[]): Problem[] {
@@ -111,10 +136,11 @@ function repeatedIds(list: string, entries: readonly { readonly id: string }[]):
 }
 
 /** An empty date is a date not entered. */
-function dateProblems(date: string | undefined): Problem[] {
+function dateProblems(field: string, date: string | undefined): Problem[] {
   if (date === undefined || date === '' || isDate(date)) return [];
-  const right = rightFor('surveyedOn') ?? '';
-  return [{ path: 'site.surveyedOn', value: shown(date), wrong: 'not a date of the calendar', right }];
+  return [
+    { path: field, value: shown(date), wrong: 'not a date of the calendar', right: rightFor('surveyedOn') ?? '' },
+  ];
 }
 
 function isDate(text: string): boolean {

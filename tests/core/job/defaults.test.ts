@@ -13,7 +13,7 @@ function assumedFields(scheme: Scheme): string[] {
 
 describe('a scheme that says only what it must', () => {
   it('is filled with the usual figures', () => {
-    expect(resolveScheme(bare).resolved).toEqual({
+    expect(resolveScheme(bare).resolved).toMatchObject({
       id: 's1',
       name: 'As found',
       role: 'as-found',
@@ -75,9 +75,9 @@ describe('single gaps', () => {
 
   it('a wall or fill without its weight has one, each its own', () => {
     const wall = resolveScheme({ ...bare, above: { kind: 'wall', height: 1.2 } });
-    expect(wall.resolved.above).toEqual({ kind: 'wall', height: 1.2, unitWeight: 20 });
+    expect(wall.resolved.above).toMatchObject({ kind: 'wall', height: 1.2, unitWeight: 20 });
     const fill = resolveScheme({ ...bare, above: { kind: 'fill' } });
-    expect(fill.resolved.above).toEqual({ kind: 'fill', height: 0, unitWeight: 18 });
+    expect(fill.resolved.above).toMatchObject({ kind: 'fill', height: 0, unitWeight: 18 });
     expect(fill.assumed.filter(({ field }) => field.startsWith('above')).map(({ field }) => field)).toEqual([
       'above.height',
       'above.unitWeight',
@@ -86,7 +86,7 @@ describe('single gaps', () => {
 
   it('what is said of nothing above is not used', () => {
     const { resolved, assumed } = resolveScheme({ ...bare, above: { kind: 'none', height: 2, unitWeight: 20 } });
-    expect(resolved.above).toEqual({ kind: 'none', height: 0, unitWeight: 0 });
+    expect(resolved.above).toMatchObject({ kind: 'none', height: 0, unitWeight: 0 });
     expect(assumed.map(({ field }) => field)).not.toContain('above.kind');
   });
 

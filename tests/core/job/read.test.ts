@@ -196,7 +196,10 @@ describe('a field that is wrong is answered with its path, what was found and wh
       { breadth: null },
       'breadth: not a number (found null); give the breadth of the arch from face to face in metres, above 0 and up to 1000, such as 0.6',
     ],
-    [{ 'loads[0].kind': 'line' }, 'loads[0].kind: no kind that is known (found "line"); write "point" or "strip"'],
+    [
+      { 'loads[0].kind': 'line' },
+      'loads[0].kind: no kind that is known (found "line"); write "point", "strip" or "axle"',
+    ],
     [
       { 'loads[0].force': ABSENT },
       'loads[0].force: missing; give kilonewtons on the whole breadth, + downwards, between −10000000 and 10000000, such as 12',
@@ -281,6 +284,29 @@ describe('a field that is wrong is answered with its path, what was found and wh
     expect(refusal(northDoorText().replace('"span": 3.2', '"span": 1e999'))).toContain(
       'too large to be held as a number',
     );
+  });
+
+  it.each<[Record<string, unknown>, string]>([
+    [
+      { combinations: [{ id: 'c1' }, { id: 'c1' }] },
+      'combinations[1].id: already the id of combinations[0] (found "c1"); give a short name of 1 to 200 characters, used once only',
+    ],
+    [
+      { combinations: [{ id: 'c1', factors: [{ load: 'l9', factor: 1.5 }] }] },
+      'combinations[0].factors[0].load: no load of this scheme has this id (found "l9"); write "l1" or "l2"',
+    ],
+    [
+      { cracks: [{ id: 'k1', joint: 3, face: 'intrados', seenOn: '2026-13-01' }] },
+      'cracks[0].seenOn: not a date of the calendar (found "2026-13-01"); give a date as year-month-day, such as 2026-05-14, or leave it out',
+    ],
+    [
+      { 'above.openings': [{ from: 0.4, to: -0.4, sill: 2, head: 2 }] },
+      'above.openings[0].to: an opening ends to the right of where it begins (found -0.4); give metres above 0.4\n' +
+        `${SCHEME}.above.openings[0].head: the head of an opening is above its sill (found 2); give metres above 2`,
+    ],
+  ])('%o, which only other fields show to be wrong', (changes, sentence) => {
+    const placed = Object.fromEntries(Object.entries(changes).map(([path, value]) => [`${SCHEME}.${path}`, value]));
+    expect(refusal(northDoorText(placed))).toBe(`${SCHEME}.${sentence}`);
   });
 
   it('two schemes of one id, and an as-found that is not the first', () => {
