@@ -70,11 +70,13 @@ const RIGHT: Readonly<Record<string, string>> = {
   backing: 'give an object such as { "level": 1.1, "counts": "weight" }',
   level: placeLike('the top of the backing over the springing line'),
   counts: 'write "weight" where the backing only weighs, or "masonry" where it backs the ring',
-  layers: 'give a list of layers, the lowest first, each such as { "name": "paving", "thickness": 0.1, "unitWeight": 24 }',
+  layers:
+    'give a list of layers, the lowest first, each such as { "name": "paving", "thickness": 0.1, "unitWeight": 24 }',
   openings: 'give a list of openings, each such as { "from": -0.4, "to": 0.4, "sill": 1.6, "head": 2.8 }',
   sill: `give the height of the sill over the springing line in metres, between −${LIMITS.length} and ${LIMITS.length}`,
   head: `give the height of the head over the springing line in metres, between −${LIMITS.length} and ${LIMITS.length}`,
-  sidePressure: 'give the horizontal pressure of the fill over the vertical, from 0 to 10, such as 0.3, or leave it out',
+  sidePressure:
+    'give the horizontal pressure of the fill over the vertical, from 0 to 10, such as 0.3, or leave it out',
   action: 'write "permanent" or "variable", or leave it out',
   patch: 'give the length of the wheel print along the span in metres, from 0, such as 0.3',
   dispersal: 'give the spread to each side for each metre down, from 0 to 5, such as 0.5',
