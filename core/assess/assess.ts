@@ -17,6 +17,7 @@ import { leastMiddleShare, type MiddleShare } from '../statics/geometric-safety.
 import { lineOfThrust } from '../statics/line.ts';
 import { neededStrength } from '../statics/needed-strength.ts';
 import { neededFriction } from '../statics/sliding.ts';
+import { ringSystem } from '../statics/system.ts';
 import { thinnestRing } from '../statics/thinnest-ring.ts';
 import { thrustRange, type ThrustAnswer } from '../statics/thrust.ts';
 import { usableThrust } from '../statics/usable-thrust.ts';
@@ -29,6 +30,8 @@ import { printedMechanism, printedProof, printedReaction, printedThrust, springi
 export interface AssessedScheme {
   readonly resolved: ResolvedScheme;
   readonly ring: RingGeometry;
+  /** For the questions that are asked one by one. */
+  readonly built: BuiltScheme;
   readonly result: SchemeAssessment;
 }
 
@@ -60,7 +63,7 @@ export function assessScheme(arch: Arch, scheme: Scheme): SchemeOutcome {
   const { resolved, assumed } = resolveScheme(scheme, Math.max(0, arch.schemes.indexOf(scheme)));
   try {
     const built = buildScheme(resolved);
-    return { ok: true, assessed: { resolved, ring: built.ring, result: assess(arch, built, assumed) } };
+    return { ok: true, assessed: { resolved, ring: built.ring, built, result: assess(arch, built, assumed) } };
   } catch (error) {
     if (error instanceof ProblemError) return { ok: false, problems: error.problems };
     throw error;
@@ -68,24 +71,26 @@ export function assessScheme(arch: Arch, scheme: Scheme): SchemeOutcome {
 }
 
 function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): SchemeAssessment {
-  const { resolved, ring, blocks, system } = built;
+  const { resolved, ring, joints, blocks, system } = built;
   const { masonry, breadth } = resolved;
   const answer = thrustRange(system);
   const { stands } = answer;
   const middle = leastMiddleShare(system);
   const least = stands ? answer.least : null;
-  const line = least === null ? [] : lineOfThrust(system, ring.joints, least.state);
+  const line = least === null ? [] : lineOfThrust(system, joints, least.state);
   const springings = least === null ? null : springingForces(system, least, line);
   return {
     arch: arch.id,
     scheme: resolved.id,
     name: `${arch.name ?? arch.id} / ${resolved.name}`,
     assumed,
-    model: { joints: ring.joints.map(({ intrados, extrados }) => ({ intrados, extrados })), blocks },
-    crown: crownBalance(ring, system, (split) => loadRing(split, resolved)),
+    model: { joints: joints.map(({ intrados, extrados }) => ({ intrados, extrados })), blocks },
+    crown: crownBalance(ring, joints === ring.joints ? system : ringSystem(ring.joints, blocks), (split) =>
+      loadRing(split, resolved),
+    ),
     thrust: printedThrust(
       system,
-      ring,
+      joints,
       answer,
       line,
       stands ? usableThrust(system, { friction: masonry.friction, strength: masonry.strength, breadth }) : null,
@@ -98,18 +103,18 @@ function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): Sc
     thinnestRing: thinnest(built, middle),
     loadFactors: loadFactors(built),
     swayCapacity: swayCapacity(built),
-    ...(stands ? {} : { mechanism: printedMechanism(ring, blocks, answer.mechanism) }),
+    ...(stands ? {} : { mechanism: printedMechanism(joints, blocks, answer.mechanism) }),
     checks: checksOf(built, answer, middle),
-    proof: printedProof(ring, system, blocks, least, line, springings),
+    proof: printedProof(joints, system, blocks, least, line, springings),
   };
 }
 
 function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare | null): Check[] {
-  const { resolved, ring, system } = built;
+  const { resolved, system } = built;
   const { masonry, breadth, asked } = resolved;
   const hinges = answer.stands ? (middle?.touches ?? []) : answer.mechanism;
-  const joints = [...new Set(hinges.map(({ joint }) => joint))];
-  const governing = ring.joints[joints[0] ?? 0];
+  const numbers = [...new Set(hinges.map(({ joint }) => joint))];
+  const governing = built.joints[numbers[0] ?? 0];
   const inside = answer.stands ? (middle?.state ?? null) : null;
   return [
     compressionOnly({
@@ -117,7 +122,7 @@ function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare 
       thickness: governing ? distance(governing.intrados, governing.extrados) : 0,
       share: middle?.share ?? null,
       endlessThrust: middle !== null && middle.state === null,
-      joints,
+      joints: numbers,
       askedSafety: asked.geometricSafety,
     }),
     sliding(masonry.friction, answer.stands ? neededFriction(system) : null),

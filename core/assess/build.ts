@@ -1,5 +1,6 @@
 /** From a scheme with its defaults filled to figures for the statics: ring, forces and system. */
-import { buildRing, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import { bearingJoints } from '../geometry/bearing.ts';
+import { buildRing, type Joint, type RingForm, type RingGeometry } from '../geometry/ring.ts';
 import type { ResolvedScheme } from '../job/defaults.ts';
 import type { Block } from '../loading/forces.ts';
 import { loadRing } from '../loading/load-ring.ts';
@@ -8,6 +9,8 @@ import { ringSystem, type RingSystem } from '../statics/system.ts';
 export interface BuiltScheme {
   readonly resolved: ResolvedScheme;
   readonly ring: RingGeometry;
+  /** What each joint carries on: the ring's joints, less lost mortar, with backing that counts as masonry. */
+  readonly joints: readonly Joint[];
   readonly blocks: readonly Block[];
   readonly system: RingSystem;
 }
@@ -15,21 +18,26 @@ export interface BuiltScheme {
 /** @throws ProblemError with paths from the scheme's root. */
 export function buildScheme(resolved: ResolvedScheme): BuiltScheme {
   const ring = buildRing(ringForm(resolved));
+  const joints = bearingJoints(ring.joints, {
+    lostMortar: resolved.ring.lostMortar,
+    backingLevel: resolved.backing?.counts === 'masonry' ? resolved.backing.level : null,
+  });
   const blocks = loadRing(ring, resolved);
-  return { resolved, ring, blocks, system: ringSystem(ring.joints, blocks) };
+  return { resolved, ring, joints, blocks, system: ringSystem(joints, blocks) };
 }
 
 export function ringForm({ profile, ring }: ResolvedScheme): RingForm {
   return {
     profile,
-    thickness: { crown: ring.thickness, springing: ring.thickness },
+    thickness: { crown: ring.thickness, springing: ring.springingThickness },
     voussoirs: ring.voussoirs,
     joints: ring.joints,
   };
 }
 
-/** The same scheme with another ring thickness, m. */
-export const withThickness = (resolved: ResolvedScheme, thickness: number): ResolvedScheme => ({
-  ...resolved,
-  ring: { ...resolved.ring, thickness },
-});
+/** The same scheme with another ring thickness at the crown, m; at the springings it changes in proportion. */
+export function withThickness(resolved: ResolvedScheme, thickness: number): ResolvedScheme {
+  const { ring } = resolved;
+  const springingThickness = (ring.springingThickness * thickness) / ring.thickness;
+  return { ...resolved, ring: { ...ring, thickness, springingThickness } };
+}

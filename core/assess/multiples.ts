@@ -11,9 +11,9 @@ const without = (blocks: readonly Block[], from: string): Block[] =>
   blocks.map(({ forces }) => ({ forces: forces.filter((force) => force.from !== from) }));
 
 /** The factor of each load by itself, the others staying as they are. */
-export function loadFactors({ resolved, ring, blocks }: BuiltScheme): LoadFactor[] {
+export function loadFactors({ resolved, joints, blocks }: BuiltScheme): LoadFactor[] {
   return resolved.loads.map(({ id }) => {
-    const rest = ringSystem(ring.joints, without(blocks, id));
+    const rest = ringSystem(joints, without(blocks, id));
     const set = sumsOf(rest.frame, blocks, ({ forces }) => forces.filter(({ from }) => from === id));
     const answer = greatestMultiplier(rest, set);
     return answer.kind === 'limit'
@@ -26,8 +26,8 @@ export function loadFactors({ resolved, ring, blocks }: BuiltScheme): LoadFactor
  * The sideways acceleration over gravity, either way, at which the ring becomes a mechanism: the smaller of the two.
  * Null when the ring does not stand upright, or when no acceleration moves it.
  */
-export function swayCapacity({ ring, blocks }: BuiltScheme): number | null {
-  const rest = ringSystem(ring.joints, without(blocks, 'sway'));
+export function swayCapacity({ joints, blocks }: BuiltScheme): number | null {
+  const rest = ringSystem(joints, without(blocks, 'sway'));
   let least: number | null = null;
   for (const direction of [1, -1]) {
     const set = sumsOf(rest.frame, blocks, ({ forces }) => swayForces(forces, direction));

@@ -1,6 +1,6 @@
 /** Answers of the statics in the words and units of the assessment document. */
 import type { Point } from '../geometry/point.ts';
-import type { RingGeometry } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/ring.ts';
 import { lineOfThrust } from '../statics/line.ts';
 import { motionsOf, thrustByVirtualWork, workOf } from '../statics/mechanism.ts';
 import { equilibriumResidual, type SpringingForce } from '../statics/proof.ts';
@@ -14,7 +14,7 @@ export const plainHinges = (hinges: readonly TurningHinge[]): Hinge[] =>
 
 export function printedThrust(
   system: RingSystem,
-  ring: RingGeometry,
+  joints: readonly Joint[],
   answer: ThrustAnswer,
   leastLine: readonly (Point | null)[],
   usable: UsableThrust | null,
@@ -29,7 +29,7 @@ export function printedThrust(
   return {
     stands: true,
     least: printed(answer.least, leastLine),
-    greatest: printed(answer.greatest, answer.greatest ? lineOfThrust(system, ring.joints, answer.greatest.state) : []),
+    greatest: printed(answer.greatest, answer.greatest ? lineOfThrust(system, joints, answer.greatest.state) : []),
     usable,
   };
 }
@@ -62,15 +62,15 @@ export const printedReaction = ({ horizontal, vertical, at }: SpringingForce): R
 });
 
 export function printedMechanism(
-  ring: RingGeometry,
+  joints: readonly Joint[],
   blocks: readonly Block[],
   hinges: readonly TurningHinge[],
 ): Mechanism {
-  return { hinges, work: workOf(blocks, motionsOf(ring.joints, hinges)) };
+  return { hinges, work: workOf(blocks, motionsOf(joints, hinges)) };
 }
 
 export function printedProof(
-  ring: RingGeometry,
+  joints: readonly Joint[],
   system: RingSystem,
   blocks: readonly Block[],
   least: Extreme | null,
@@ -80,7 +80,7 @@ export function printedProof(
   if (least === null || springings === null) {
     return { equilibriumResidual: null, static: null, kinematic: null, gap: null };
   }
-  const kinematic = thrustByVirtualWork(ring.joints, blocks, least.hinges);
+  const kinematic = thrustByVirtualWork(joints, blocks, least.hinges);
   const size = Math.max(Math.abs(least.horizontal), system.frame.force);
   return {
     equilibriumResidual: equilibriumResidual(blocks, line, springings.left, springings.right),

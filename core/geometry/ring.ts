@@ -47,6 +47,8 @@ export interface RingGeometry {
   readonly splitAtCrown: () => { readonly ring: RingGeometry; readonly crown: number };
   /** The sky-facing stretch of one block's extrados; null where its whole back faces down. */
   readonly skyFace: (block: number) => SkyFace | null;
+  /** The parts of that stretch at or under a level (m), left to right. */
+  readonly skyFacesBelow: (block: number, level: number) => readonly SkyFace[];
   /** The outline of one block: from its left joint's intrados along the soffit, up, back along the extrados. */
   readonly outline: (block: number) => Outline;
 }
@@ -128,6 +130,7 @@ function ringOf(pieces: readonly Piece[], stations: readonly Station[], joints: 
       return { ring: ringOf(pieces, [...stations.slice(0, crown), split, ...stations.slice(crown)], joints), crown };
     },
     skyFace: (block) => skyFaceOf(pieces, station(block), station(block + 1), blocks[block] as RingBlock),
+    skyFacesBelow: (block, level) => skyFacesBelow(pieces, station(block), station(block + 1), level),
     outline: (block) => outlineOf(pieces, station(block), station(block + 1)),
   };
   return ring;
@@ -165,7 +168,9 @@ function stationAtLength(pieces: readonly Piece[], length: number): Station {
 /** The plumb joint that rises from the intrados point of a square one. */
 function plumb(pieces: readonly Piece[], square: Station): Station {
   const { x } = square.intrados;
-  for (let i = 0; i < pieces.length; i++) {
+  const soffit = pieceAt(pieces, square.piece).intrados;
+  const leansBack = soffit.derivative(square.u).x * (soffit.to - soffit.from) < 0;
+  for (let i = 0; i < pieces.length && !leansBack; i++) {
     const { extrados, extradosFrom, extradosTo } = pieceAt(pieces, i);
     if (x > extrados.at(extradosTo).x && i < pieces.length - 1) continue;
     const topU = clampBetween(extrados.parameterAtX(x), extradosFrom, extradosTo);
@@ -255,6 +260,39 @@ function skyFaceOf(pieces: readonly Piece[], left: Station, right: Station, { ba
     moments = { area: moments.area + area, sx: moments.sx + sx, sy: moments.sy + sy };
   }
   return { from: first.curve.at(first.a), to: last.curve.at(last.b), moments, origin };
+}
+
+function skyFacesBelow(pieces: readonly Piece[], left: Station, right: Station, level: number): SkyFace[] {
+  const faces: SkyFace[] = [];
+  const origin = left.intrados;
+  eachStretch(pieces, 'extrados', left, right, (curve, u0, u1) => {
+    const a = clampBetween(u0, curve.skyward.from, curve.skyward.to);
+    const b = clampBetween(u1, curve.skyward.from, curve.skyward.to);
+    if (a === b) return;
+    const peak = curve.highest(a, b);
+    for (const [low, high, rising] of [
+      [a, peak, true],
+      [peak, b, false],
+    ] as const) {
+      if (low === high) continue;
+      const [foot, top] = rising ? [low, high] : [high, low];
+      if (curve.at(foot).y >= level) continue;
+      const end = curve.at(top).y <= level ? top : whereAtLevel(curve, foot, top, level);
+      const [from, to] = rising ? [foot, end] : [end, foot];
+      faces.push({ from: curve.at(from), to: curve.at(to), moments: curve.moments(from, to, origin), origin });
+    }
+  });
+  return faces;
+}
+
+/** Between a parameter under the level and one over it, by halving to the rounding of the ends. */
+function whereAtLevel(curve: Curve, under: number, over: number, level: number): number {
+  for (let step = 0; step < 60; step++) {
+    const u = (under + over) / 2;
+    if (curve.at(u).y <= level) under = u;
+    else over = u;
+  }
+  return under;
 }
 
 function outlineOf(pieces: readonly Piece[], left: Station, right: Station): Outline {

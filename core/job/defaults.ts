@@ -5,7 +5,7 @@
  * `Assumed`; what is merely absent (no loads, no sway, level springings, no name) is filled without a word.
  */
 import type { Assumed } from './assumed.ts';
-import type { Above, Load, Masonry, Profile, Ring, Scheme, Support } from './schema.ts';
+import type { Above, Backing, Combination, Crack, Load, Masonry, Profile, Ring, Scheme, Support } from './schema.ts';
 
 /** Every field given; `null` only where the value is not known and nothing sensible stands in for it. */
 type Filled<T> = T extends unknown ? { readonly [Key in keyof T]-?: Exclude<T[Key], undefined> } : never;
@@ -19,6 +19,8 @@ export type ResolvedRing = Filled<Ring>;
 export type ResolvedMasonry = Filled<Masonry>;
 export type ResolvedAbove = Filled<Above>;
 export type ResolvedLoad = Filled<Load>;
+export type ResolvedBacking = Filled<Backing>;
+export type ResolvedCombination = Filled<Combination>;
 
 /** A scheme with nothing left open; the same units and axes as the job. */
 export interface ResolvedScheme {
@@ -30,8 +32,12 @@ export interface ResolvedScheme {
   readonly breadth: number;
   readonly masonry: ResolvedMasonry;
   readonly above: ResolvedAbove;
+  /** Null where there is none. */
+  readonly backing: ResolvedBacking | null;
   readonly loads: readonly ResolvedLoad[];
   readonly sway: number;
+  readonly combinations: readonly ResolvedCombination[];
+  readonly cracks: readonly Crack[];
   readonly supports: { readonly left: Support; readonly right: Support };
   readonly asked: { readonly geometricSafety: number };
 }
@@ -42,6 +48,10 @@ const UNIT_WEIGHT = 22;
 const FRICTION = 0.6;
 const ABOVE_UNIT_WEIGHT = { wall: 20, fill: 18 } as const;
 const GEOMETRIC_SAFETY = 2;
+/** Length of a wheel's print along the span, m; a point load where the fill is deep makes little of it. */
+const PATCH = 0.3;
+/** Spread to each side for each metre down. */
+const DISPERSAL = 0.5;
 
 /**
  * Fills every optional field of a scheme.
@@ -60,8 +70,11 @@ export function resolveScheme(scheme: Scheme, index = 0): { resolved: ResolvedSc
     breadth: scheme.breadth,
     masonry: resolveMasonry(scheme.masonry ?? {}, assumed),
     above: resolveAbove(scheme.above, assumed),
-    loads: (scheme.loads ?? []).map((load) => ({ ...load, name: load.name ?? load.id })),
+    backing: scheme.backing === undefined ? null : resolveBacking(scheme.backing, assumed),
+    loads: (scheme.loads ?? []).map((load, i) => resolveLoad(load, `loads[${i}]`, assumed)),
     sway: scheme.sway ?? 0,
+    combinations: (scheme.combinations ?? []).map(resolveCombination),
+    cracks: scheme.cracks ?? [],
     supports: resolveSupports(scheme.supports ?? {}, assumed),
     asked: { geometricSafety: scheme.asked?.geometricSafety ?? assumeSafety(assumed) },
   };
@@ -111,6 +124,9 @@ function resolveRing(scheme: Scheme, assumed: Assumed[]): ResolvedRing {
     ...ring,
     voussoirs: ring.voussoirs ?? assumeVoussoirs(profile.shape, assumed),
     joints: ring.joints ?? assumeJoints(assumed),
+    springingThickness: ring.springingThickness ?? ring.thickness,
+    courses: ring.courses ?? 1,
+    lostMortar: ring.lostMortar ?? [],
   };
 }
 
@@ -168,15 +184,20 @@ function resolveMasonry(masonry: Masonry, assumed: Assumed[]): ResolvedMasonry {
 }
 
 function resolveAbove(above: Above | undefined, assumed: Assumed[]): ResolvedAbove {
+  const rest = {
+    layers: (above?.layers ?? []).map((layer, i) => ({ ...layer, name: layer.name ?? `Layer ${i + 1}` })),
+    openings: above?.openings ?? [],
+    sidePressure: above?.sidePressure ?? 0,
+  };
   if (above === undefined) {
     assumed.push({
       field: 'above.kind',
       value: 'none',
       because: 'Nothing is said of what the ring carries above it; it is taken as bare.',
     });
-    return { kind: 'none', height: 0, unitWeight: 0 };
+    return { ...rest, kind: 'none', height: 0, unitWeight: 0 };
   }
-  if (above.kind === 'none') return { ...above, height: 0, unitWeight: 0 };
+  if (above.kind === 'none') return { ...above, ...rest, height: 0, unitWeight: 0 };
   const { kind, height, unitWeight } = above;
   if (height === undefined) {
     assumed.push({
@@ -195,8 +216,42 @@ function resolveAbove(above: Above | undefined, assumed: Assumed[]): ResolvedAbo
           : 'No unit weight is given for the fill above; 18 kN/m³ is taken, between sand and gravel at 15–16 and hardcore at 18.5–19.5 (EN 1991-1-1 Annex A, from memory; typical, verify).',
     });
   }
-  return { ...above, height: height ?? 0, unitWeight: unitWeight ?? ABOVE_UNIT_WEIGHT[kind] };
+  return { ...above, ...rest, height: height ?? 0, unitWeight: unitWeight ?? ABOVE_UNIT_WEIGHT[kind] };
 }
+
+function resolveBacking(backing: Backing, assumed: Assumed[]): ResolvedBacking {
+  if (backing.unitWeight === undefined) {
+    assumed.push({
+      field: 'backing.unitWeight',
+      value: ABOVE_UNIT_WEIGHT.wall,
+      because:
+        'No unit weight is given for the backing; 20 kN/m³ of roughly dressed masonry is taken (Circolare 2019, Table C8.5.I).',
+    });
+  }
+  return { ...backing, unitWeight: backing.unitWeight ?? ABOVE_UNIT_WEIGHT.wall };
+}
+
+function resolveLoad(load: Load, path: string, assumed: Assumed[]): ResolvedLoad {
+  const common = { name: load.name ?? load.id, action: load.action ?? 'variable' } as const;
+  if (load.kind !== 'axle') return { ...load, ...common };
+  if (load.dispersal === undefined) {
+    assumed.push({
+      field: `${path}.dispersal`,
+      value: DISPERSAL,
+      because:
+        'No spread through the fill is given; one across for two down is taken (common practice in bridge assessment).',
+    });
+  }
+  return { ...load, ...common, patch: load.patch ?? PATCH, dispersal: load.dispersal ?? DISPERSAL };
+}
+
+const resolveCombination = (combination: Combination): ResolvedCombination => ({
+  ...combination,
+  name: combination.name ?? combination.id,
+  permanent: combination.permanent ?? 1,
+  variable: combination.variable ?? 1,
+  factors: combination.factors ?? [],
+});
 
 const RIGID: Support = { kind: 'rigid' };
 

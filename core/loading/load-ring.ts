@@ -2,12 +2,13 @@
 import type { RingGeometry } from '../geometry/ring.ts';
 import type { ResolvedScheme } from '../job/defaults.ts';
 import { ProblemError, underPath, type Problem } from '../job/problem.ts';
+import { addBacking, addColumns, addLayers, addSidePressure, layersHeight, takeOutOpenings } from './above.ts';
 import type { Block, BlockForce, BlockForces } from './forces.ts';
 import { addLoad } from './loads.ts';
-import { addAbove, addSelfWeight } from './masonry.ts';
-import { skyOver } from './sky.ts';
+import { addSelfWeight } from './self-weight.ts';
+import { skyOver, type Sky } from './sky.ts';
 
-/** Top level of what lies above, m: the wall's or fill's height over the crown extrados. */
+/** Top level of the wall or fill, m: its height over the crown extrados. */
 export function topLevel(ring: RingGeometry, scheme: Pick<ResolvedScheme, 'above'>): number {
   return ring.crownExtrados.y + (scheme.above.kind === 'none' ? 0 : scheme.above.height);
 }
@@ -19,14 +20,16 @@ export function topLevel(ring: RingGeometry, scheme: Pick<ResolvedScheme, 'above
  */
 export function loadRing(ring: RingGeometry, scheme: ResolvedScheme): Block[] {
   const forces: BlockForces = ring.blocks.map(() => []);
-  const { above, breadth, masonry, loads, sway } = scheme;
+  const { above, backing, breadth, masonry, loads, sway } = scheme;
   addSelfWeight(forces, ring, masonry.unitWeight, breadth);
-  if (above.kind !== 'none' || loads.length > 0) {
+  if (above.kind !== 'none' || backing !== null || loads.length > 0) {
     const sky = skyOver(ring);
-    if (above.kind !== 'none') addAbove(forces, sky, topLevel(ring, scheme), above.unitWeight, breadth);
     const problems: Problem[] = [];
+    if (above.kind !== 'none') problems.push(...addWhatLiesAbove(forces, ring, sky, scheme));
+    if (backing !== null) addBacking(forces, ring, backing, above.unitWeight, breadth);
+    const ground = { sky, breadth, surface: topLevel(ring, scheme) + layersHeight(above.layers) };
     loads.forEach((load, i) => {
-      problems.push(...underPath(`loads[${i}]`, addLoad(forces, sky, load, breadth)));
+      problems.push(...underPath(`loads[${i}]`, addLoad(forces, ground, load)));
     });
     if (problems.length > 0) throw new ProblemError(problems);
   }
@@ -34,9 +37,31 @@ export function loadRing(ring: RingGeometry, scheme: ResolvedScheme): Block[] {
   return forces.map((block) => ({ forces: block }));
 }
 
+function addWhatLiesAbove(
+  forces: BlockForces,
+  ring: RingGeometry,
+  sky: Sky,
+  { above, backing, breadth }: Pick<ResolvedScheme, 'above' | 'backing' | 'breadth'>,
+): Problem[] {
+  const top = topLevel(ring, { above });
+  const problems: Problem[] = [];
+  if (backing !== null && backing.level > top) {
+    problems.push({
+      path: 'backing.level',
+      value: `${backing.level} m`,
+      wrong: 'the backing stands higher than what lies above the ring',
+      right: `at most ${Number(top.toPrecision(4))} m here`,
+    });
+  }
+  addColumns(forces, sky, top, above.unitWeight, breadth);
+  addLayers(forces, sky, above.layers, breadth);
+  addSidePressure(forces, sky, top, above.sidePressure, above.unitWeight, breadth);
+  return [...problems, ...underPath('above', takeOutOpenings(forces, sky, above, top, breadth))];
+}
+
 /** Horizontal forces of `sway` times the weight of masonry and fill among these forces, at their places. */
 export function swayForces(forces: readonly BlockForce[], sway: number): BlockForce[] {
   return forces
-    .filter(({ from }) => from === 'self-weight' || from === 'above')
+    .filter(({ from, fy }) => (from === 'self-weight' || from === 'above') && fy !== 0)
     .map(({ x, y, fy }) => ({ x, y, fx: -fy * sway, fy: 0, from: 'sway' }));
 }

@@ -7,7 +7,15 @@ import { boxOf } from '../../core/drawing/extent.ts';
 import { itemPoints, type PathItem, type Scene } from '../../core/drawing/scene.ts';
 import type { Point } from '../../core/geometry/point.ts';
 import type { ResolvedLoad } from '../../core/job/defaults.ts';
-import { crownHeightOf, moveCrown, moveExtrados, moveLoad, moveSpringing, resizeStrip, setAbove } from '../../core/job/edits.ts';
+import {
+  crownHeightOf,
+  moveCrown,
+  moveExtrados,
+  moveLoad,
+  moveSpringing,
+  resizeStrip,
+  setAbove,
+} from '../../core/job/edits.ts';
 import type { Scheme } from '../../core/job/schema.ts';
 
 export interface Handle {
@@ -89,7 +97,9 @@ const FROM_CORNER = 9;
 
 /** On the top as it is drawn: a wall too tall for the drawing is broken off, and taken hold of there. */
 function topHandle({ resolved }: AssessedScheme, scene: Scene): Handle[] {
-  const body = scene.layers.find(({ name }) => name === 'above')?.items.find((item) => item.kind === 'path' && item.closed);
+  const body = scene.layers
+    .find(({ name }) => name === 'above')
+    ?.items.find((item) => item.kind === 'path' && item.closed);
   if (resolved.above.kind === 'none' || body === undefined) return [];
   const box = boxOf(itemPoints(body, scene.millimetresPerUnit));
   if (box === null) return [];
@@ -112,7 +122,15 @@ function topHandle({ resolved }: AssessedScheme, scene: Scene): Handle[] {
 function loadHandles(load: ResolvedLoad, scene: Scene): Handle[] {
   const drawn = drawnLoad(scene, load.id);
   if (drawn === null) return [];
-  const handle = (id: string, name: string, measure: string, at: Point, value: number, set: Handle['set'], path: string | null): Handle => ({
+  const handle = (
+    id: string,
+    name: string,
+    measure: string,
+    at: Point,
+    value: number,
+    set: Handle['set'],
+    path: string | null,
+  ): Handle => ({
     id: `load-${load.id}-${id}`,
     name,
     measure: `${load.name} ${measure}`,
@@ -125,14 +143,22 @@ function loadHandles(load: ResolvedLoad, scene: Scene): Handle[] {
   });
   const field = (name: string): string => `loads.${load.id}.${name}`;
   const moved = (scheme: Scheme, x: number): Scheme => moveLoad(scheme, load.id, x);
-  if (load.kind === 'point') {
+  if (load.kind !== 'strip') {
     const at = { x: load.x, y: lowest(drawn) };
     return [handle('x', `Place of ${load.name}, from mid-span`, 'place', at, load.x, moved, field('x'))];
   }
   const bar = highest(drawn);
   const middle = (load.from + load.to) / 2;
   const end = (name: 'from' | 'to', words: string): Handle =>
-    handle(name, `${words} end of ${load.name}, from mid-span`, `${words.toLowerCase()} end`, { x: load[name], y: bar }, load[name], (scheme, x) => resizeStrip(scheme, load.id, name, x), field(name));
+    handle(
+      name,
+      `${words} end of ${load.name}, from mid-span`,
+      `${words.toLowerCase()} end`,
+      { x: load[name], y: bar },
+      load[name],
+      (scheme, x) => resizeStrip(scheme, load.id, name, x),
+      field(name),
+    );
   return [
     end('from', 'Left'),
     handle('middle', `Middle of ${load.name}, from mid-span`, 'place', { x: middle, y: bar }, middle, moved, null),
@@ -148,13 +174,19 @@ function drawnLoad(scene: Scene, id: string): PathItem[] | null {
   return paths.length === 0 ? null : paths;
 }
 
-const heights = (paths: readonly PathItem[]): number[] => paths.flatMap(({ start, edges }) => [start.y, ...edges.map(({ to }) => to.y)]);
+const heights = (paths: readonly PathItem[]): number[] =>
+  paths.flatMap(({ start, edges }) => [start.y, ...edges.map(({ to }) => to.y)]);
 const lowest = (paths: readonly PathItem[]): number => Math.min(...heights(paths));
 /** The bar of a strip is its first stroke, whatever flag flies over it. */
 const highest = ([bar]: readonly PathItem[]): number => bar?.start.y ?? 0;
 
 /** The nearest handle within `reach` pixels of a pixel; `place` gives a handle's own pixel. */
-export function nearestHandle(handles: readonly Handle[], pixel: Point, reach: number, place: (point: Point) => Point): Handle | null {
+export function nearestHandle(
+  handles: readonly Handle[],
+  pixel: Point,
+  reach: number,
+  place: (point: Point) => Point,
+): Handle | null {
   let nearest: Handle | null = null;
   let least = reach;
   for (const handle of handles) {
@@ -179,4 +211,3 @@ export const NUDGE = { fine: 0.001, usual: 0.01, coarse: 0.1 } as const;
 
 /** A nudged value without the last digits that binary fractions leave behind. */
 export const tidy = (value: number): number => Number(value.toFixed(6)) + 0;
-

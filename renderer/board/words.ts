@@ -24,7 +24,7 @@ export function boardInWords(assessed: AssessedScheme): string {
 }
 
 function loadInWords(load: ResolvedLoad): string {
-  return load.kind === 'point'
+  return load.kind !== 'strip'
     ? `${load.name}, ${figure(load.force)} kN ${placeInWords(load.x)}`
     : `${load.name}, ${figure(load.intensity)} kN/m² from ${placeInWords(load.from)} to ${placeInWords(load.to)}`;
 }

@@ -38,7 +38,7 @@ export function setLoad(scheme: Scheme, loadId: string, patch: LoadPatch): Schem
   return withLoad(scheme, loadId, (load) => {
     const { name, x, force, from, to, intensity } = patch;
     const named = 'name' in patch ? patched(load, { name }) : load;
-    if (named.kind === 'point') {
+    if (named.kind !== 'strip') {
       return heldLoad({ ...named, x: known(x, named.x), force: known(force, named.force) });
     }
     const [left, right] = [known(from, named.from), known(to, named.to)].sort((a, b) => a - b) as [number, number];
@@ -50,7 +50,7 @@ export function setLoad(scheme: Scheme, loadId: string, patch: LoadPatch): Schem
 export function moveLoad(scheme: Scheme, loadId: string, x: number): Scheme {
   return withLoad(scheme, loadId, (load) => {
     if (!Number.isFinite(x)) return load;
-    if (load.kind === 'point') return heldLoad({ ...load, x });
+    if (load.kind !== 'strip') return heldLoad({ ...load, x });
     const half = (load.to - load.from) / 2;
     const middle = held(x, half - LIMITS.length, LIMITS.length - half, x);
     return heldLoad({ ...load, from: middle - half, to: middle + half });
@@ -80,7 +80,7 @@ function known(value: number | undefined, otherwise: number): number {
 }
 
 function heldLoad(load: Load): Load {
-  if (load.kind === 'point') {
+  if (load.kind !== 'strip') {
     const { x, force } = load;
     return {
       ...load,
