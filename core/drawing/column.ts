@@ -7,8 +7,6 @@ import { cutToWidth, plainText, textWidth, wrapText } from './text.ts';
 const LEADING = 1.75;
 
 export class Column {
-  /** Whether everything so far found room. */
-  complete = true;
   /** Where the next line's top is, mm from the bottom of the paper. */
   top: number;
 
@@ -81,14 +79,13 @@ export class Column {
     return true;
   }
 
-  /** As many of the texts as there is room for, and a word on the rest. */
-  list(layer: LayerName, texts: readonly string[], how: LetteringStyle & { height: Lettering }): void {
+  /** As many of the texts as there is room for with `kept` mm left over, and a word on the rest. */
+  list(layer: LayerName, texts: readonly string[], how: LetteringStyle & { height: Lettering }, kept: number): void {
     const more = how.height * LEADING;
     for (const [i, text] of texts.entries()) {
       const last = i === texts.length - 1;
       const needed = paragraphHeight(text, this.width, how.height) + (last ? 0 : more);
-      if (needed > this.room) {
-        this.complete = false;
+      if (needed > this.room - kept) {
         this.paragraph(layer, `and ${texts.length - i} more`, how);
         return;
       }

@@ -18,7 +18,7 @@ import { plainText } from './text.ts';
 import { drawTitleBlock, type TitleBlock } from './title-block.ts';
 
 export interface SheetOptions {
-  /** The smallest paper to use. Where not given: A4 when everything fits there at the scale of an A3, else A3. */
+  /** The smallest paper to use, A3 where not given; a larger one is taken when the lettering needs it. */
   readonly paper?: PaperName;
   /** How lengths are lettered; metres where not given. */
   readonly length?: LengthText;
@@ -33,48 +33,31 @@ export type SheetTitle = Omit<TitleBlock, 'scale' | 'units' | 'documentType'>;
  * happening.
  */
 export function elevationSheet(assessed: AssessedScheme, title: SheetTitle, options: SheetOptions = {}): Sheet {
-  const draw = (fitted: Fitted): Composed => composed(assessed, title, options, fitted);
-  if (options.paper !== undefined) return draw(onPaperFrom(options.paper, assessed, options)).sheet;
-  const larger = onPaperFrom('A3', assessed, options);
-  const smaller = fitOn(paper('A4'), assessed, options);
-  if (smaller !== null && smaller.scale.millimetresPerMetre >= larger.scale.millimetresPerMetre) {
-    const { sheet, complete } = draw(smaller);
-    if (complete) return sheet;
-  }
-  return draw(larger).sheet;
-}
-
-interface Composed {
-  readonly sheet: Sheet;
-  /** Whether every list found room. */
-  readonly complete: boolean;
-}
-
-function composed(assessed: AssessedScheme, title: SheetTitle, options: SheetOptions, fitted: Fitted): Composed {
-  const { paper, scale, scene, zone } = fitted;
+  const { paper, scale, scene, zone } = fitted(assessed, options);
   const { resolved } = assessed;
   const items: Items = new Map();
-  const inside = insideFrame(paper);
-  const { left, bottom, right, top } = inside;
+  const { left, bottom, right, top } = insideFrame(paper);
   addItems(items, 'frame', rectangle('frame', left, bottom, right - left, top - bottom));
   const units = options.units ?? 'm, kN';
   const block = { ...title, scale: `${scale.name} on ${paper.name}`, units, documentType: 'Elevation' };
   drawTitleBlock(items, block, right, bottom, footHeight(paper, assessed));
   drawCautions(items, assessed, paper);
   drawViewTitle(items, scale, zone);
-  const complete = drawSideColumn(items, assessed, paper, {
+  drawSideColumn(items, assessed, paper, {
     key: scene.key,
     texts: [...Object.values(title), resolved.masonry.name, ...resolved.loads.map(({ name }) => name)],
     length: options.length ?? metres,
   });
   const furniture = makeScene({ title: 'Sheet', description: '', millimetresPerUnit: 1 }, items);
-  const heading = [title.title, title.subtitle]
+  const views = [centred(scene, zone), { id: 'furniture', scene: furniture, at: { x: 0, y: 0 } }];
+  return { title: headingOf(title), description: scene.description, paper, views };
+}
+
+const headingOf = ({ title, subtitle }: SheetTitle): string =>
+  [title, subtitle]
     .map(plainText)
     .filter((text) => text !== '')
     .join(', ');
-  const views = [centred(scene, zone), { id: 'furniture', scene: furniture, at: { x: 0, y: 0 } }];
-  return { complete, sheet: { title: heading, description: scene.description, paper, views } };
-}
 
 interface Fitted {
   readonly paper: Paper;
@@ -83,7 +66,8 @@ interface Fitted {
   readonly zone: Box;
 }
 
-function onPaperFrom(smallest: PaperName, assessed: AssessedScheme, options: SheetOptions): Fitted {
+function fitted(assessed: AssessedScheme, options: SheetOptions): Fitted {
+  const smallest = options.paper ?? 'A3';
   for (const name of PAPER_NAMES.slice(PAPER_NAMES.indexOf(smallest))) {
     const found = fitOn(paper(name), assessed, options);
     if (found !== null) return found;

@@ -63,7 +63,6 @@ export function drawChecks(column: Column, result: SchemeAssessment): void {
   for (const [i, { title, status, because }] of checks.entries()) {
     const left = checks.length - i;
     if (column.room < (left === 1 ? CHECK_ROW : 2 * CHECK_ROW)) {
-      column.complete = false;
       column.paragraph('figures', `and ${left} more, see the findings`, QUIET);
       return;
     }
@@ -76,7 +75,6 @@ export function drawChecks(column: Column, result: SchemeAssessment): void {
     column.space(CHECK_ROW);
     const reason = paragraphHeight(because, column.width - INDENT, 1.8);
     if (column.room - reason >= CHECK_ROW * (left - 1)) column.paragraph('figures', because, QUIET, INDENT);
-    else column.complete = false;
   }
 }
 

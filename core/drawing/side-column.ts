@@ -20,13 +20,13 @@ export interface SideColumnOptions {
   readonly length: LengthText;
 }
 
-/** @returns whether everything found room; what did not is counted in its place. */
+/** What finds no room is counted in its place, never left out without a word. */
 export function drawSideColumn(
   items: Items,
   assessed: AssessedScheme,
   paper: Paper,
   { key, texts, length }: SideColumnOptions,
-): boolean {
+): void {
   const { resolved, result } = assessed;
   const inside = insideFrame(paper);
   const width = columnWidth(paper);
@@ -36,14 +36,15 @@ export function drawSideColumn(
   const small = isSmall(paper);
   const column = new Column(items, left, width, inside.top - PAD, bottom + 2);
   const legend = legendHeight(resolved, result);
-  column.keepFree(legend);
+  const kept = legend + LISTS_IN_SHORT;
+  column.keepFree(kept);
   column.paragraph('figures', headlineOf(result), { height: small ? 2.5 : 3.5 });
   column.space(small ? 2 : 4);
   drawKeyFigures(column, assessed, length);
   column.space(2);
   drawChecks(column, result);
-  column.keepFree(-legend);
-  column.space(Math.min(2, column.room - legend));
+  column.keepFree(-kept);
+  column.space(Math.min(2, column.room - kept));
   drawLegend(column, resolved, result, small ? 1.8 : 2.5);
   const loads = key.map(({ mark, meaning }) => `${mark}  ${meaning}`);
   drawList(column, 'legend', 'Loads', loads);
@@ -54,26 +55,28 @@ export function drawSideColumn(
     result.assumed.map(({ because }) => because),
   );
   drawFontNote(column, texts);
-  return column.complete;
 }
 
+const QUIET = { height: 1.8, role: 'text-quiet' } as const;
+/** Room for a line on each list and a note, mm. */
+const LISTS_IN_SHORT = 14;
 /** Room under which a list is not begun, mm. */
-const LEAST_LIST = 16;
+const LEAST_LIST = 24;
 
 function drawList(column: Column, layer: LayerName, heading: string, texts: readonly string[]): void {
   if (texts.length === 0) return;
-  if (column.room <= LEAST_LIST) {
-    column.complete = false;
+  if (column.room < LEAST_LIST) {
+    column.paragraph(layer, `${heading}: ${texts.length}, listed in the findings`, QUIET);
     return;
   }
   column.space(2);
   column.heading(layer, heading);
-  column.list(layer, texts, { height: 1.8, role: 'text-quiet' });
+  column.list(layer, texts, QUIET, LISTS_IN_SHORT);
 }
 
 function drawFontNote(column: Column, texts: readonly string[]): void {
   if (texts.every((text) => charactersNotInFont(plainText(text)).length === 0)) return;
   column.space(2);
   const note = 'Some letters here are not in the drawing’s own font; another font may stand in for them.';
-  column.paragraph('notes', note, { height: 1.8, role: 'text-quiet' });
+  column.paragraph('notes', note, QUIET);
 }
