@@ -35,9 +35,16 @@ export function ringForm({ profile, ring }: ResolvedScheme): RingForm {
   };
 }
 
-/** The same scheme with another ring thickness at the crown, m; at the springings it changes in proportion. */
+/**
+ * The same scheme with another ring thickness at the crown, m; at the springings it changes in proportion, and a
+ * measured back gives way to an even ring.
+ */
 export function withThickness(resolved: ResolvedScheme, thickness: number): ResolvedScheme {
-  const { ring } = resolved;
-  const springingThickness = (ring.springingThickness * thickness) / ring.thickness;
-  return { ...resolved, ring: { ...ring, thickness, springingThickness } };
+  const { ring, profile } = resolved;
+  const even = ring.springingThickness === ring.thickness;
+  const springingThickness = even ? thickness : (ring.springingThickness * thickness) / ring.thickness;
+  const evenRing = { ...resolved, ring: { ...ring, thickness, springingThickness } };
+  if (profile.shape !== 'measured') return evenRing;
+  const { extrados: _measured, ...soffit } = profile;
+  return { ...evenRing, profile: soffit };
 }

@@ -1,88 +1,94 @@
-import { ProblemError } from '../job/problem.ts';
-import type { OffsettableCurve } from './curve.ts';
-import { SmoothCurve } from './smooth-curve.ts';
+/** A ring as surveyed: intrados points, and extrados points where they were taken. */
+import { ProblemError, type Problem } from '../job/problem.ts';
+import type { Profile } from '../job/schema.ts';
+import type { Point } from './point.ts';
+import type { SmoothCurve } from './smooth-curve.ts';
+import { splineThrough } from './spline.ts';
+
+type Measured = Extract<Profile, { readonly shape: 'measured' }>;
+
+/** The intrados through its points, left springing to right springing. @throws ProblemError when they do not run so. */
+export function measuredIntrados({ points, step }: Measured): SmoothCurve {
+  const problems = runningRight(points, 'profile.points');
+  if (step !== undefined && step !== 0) {
+    problems.push({
+      path: 'profile.step',
+      value: `${step} m`,
+      wrong: 'measured points already carry the level of both springings',
+      right: 'leave the step out',
+    });
+  }
+  if (problems.length > 0) throw new ProblemError(problems);
+  return splineThrough(points.map(([x, y]) => ({ x, y })));
+}
 
 /**
- * A measured intrados as a smooth curve through the survey points: a natural cubic spline over the length of the
- * chords, so that offsets and joints have a direction everywhere. Points: metres, left springing to right springing.
+ * The faces of a ring measured on both sides. The springing joints join the first and the last points of the faces;
+ * the others stand square on the intrados.
  */
-export function measuredCurves(points: readonly (readonly [number, number])[]): OffsettableCurve[] {
-  points.forEach(([x], i) => {
-    const before = points[i - 1];
-    if (before !== undefined && !(x > before[0])) {
-      throw new ProblemError([
-        {
-          path: `profile.points[${i}]`,
-          value: `x ${x} m after x ${before[0]} m`,
-          wrong: 'measured points run from the left springing to the right one',
-          right: 'give each point a greater x than the one before',
-        },
-      ]);
-    }
-  });
-  const knots = [0];
-  for (let i = 1; i < points.length; i++) {
-    const [ax, ay] = points[i - 1] as readonly [number, number];
-    const [bx, by] = points[i] as readonly [number, number];
-    knots.push((knots[i - 1] as number) + Math.hypot(bx - ax, by - ay));
+export function measuredFaces(profile: Measured, extradosPoints: NonNullable<Measured['extrados']>) {
+  const intrados = measuredIntrados(profile);
+  const problems = runningRight(extradosPoints, 'profile.extrados');
+  if (extradosPoints.length < 3) {
+    problems.push({
+      path: 'profile.extrados',
+      value: `${extradosPoints.length} points`,
+      wrong: 'two points do not give the back of a ring',
+      right: 'give at least three, or leave the extrados out and the ring is taken as thick as entered',
+    });
   }
-  const x = naturalSpline(
-    knots,
-    points.map((point) => point[0]),
-  );
-  const y = naturalSpline(
-    knots,
-    points.map((point) => point[1]),
-  );
-  const whole = new SmoothCurve(0, knots[knots.length - 1] as number, (u) => {
-    const px = x(u);
-    const py = y(u);
-    return { x: px.value, y: py.value, dx: px.first, dy: py.first, ddx: px.second, ddy: py.second };
-  });
-  // one curve between each two points: the third derivative jumps there, and quadrature must not run across a jump
-  return knots.slice(1).map((end, i) => whole.part(knots[i] as number, end));
-}
-
-interface SplineValue {
-  readonly value: number;
-  readonly first: number;
-  readonly second: number;
-}
-
-/** Natural cubic spline: second derivatives from the tridiagonal system of continuity (standard numerical analysis). */
-function naturalSpline(knots: readonly number[], values: readonly number[]): (u: number) => SplineValue {
-  const n = knots.length;
-  const second = new Float64Array(n);
-  const carried = new Float64Array(n);
-  const at = (list: ArrayLike<number>, i: number): number => list[i] as number;
-  for (let i = 1; i < n - 1; i++) {
-    const before = at(knots, i) - at(knots, i - 1);
-    const after = at(knots, i + 1) - at(knots, i);
-    const share = before / (before + after);
-    const pivot = share * at(second, i - 1) + 2;
-    second[i] = (share - 1) / pivot;
-    const bend = (at(values, i + 1) - at(values, i)) / after - (at(values, i) - at(values, i - 1)) / before;
-    carried[i] = ((6 * bend) / (before + after) - share * at(carried, i - 1)) / pivot;
-  }
-  second[n - 1] = 0;
-  for (let i = n - 2; i >= 0; i--) second[i] = at(second, i) * at(second, i + 1) + at(carried, i);
-  return (u) => {
-    let low = 0;
-    let high = n - 1;
-    while (high - low > 1) {
-      const middle = (low + high) >> 1;
-      if (at(knots, middle) > u) high = middle;
-      else low = middle;
-    }
-    const h = at(knots, high) - at(knots, low);
-    const a = (at(knots, high) - u) / h;
-    const b = (u - at(knots, low)) / h;
-    const low2 = at(second, low);
-    const high2 = at(second, high);
-    return {
-      value: a * at(values, low) + b * at(values, high) + (((a ** 3 - a) * low2 + (b ** 3 - b) * high2) * h * h) / 6,
-      first: (at(values, high) - at(values, low)) / h + (((3 * b * b - 1) * high2 - (3 * a * a - 1) * low2) * h) / 6,
-      second: a * low2 + b * high2,
-    };
+  if (problems.length > 0) throw new ProblemError(problems);
+  const extrados = splineThrough(extradosPoints.map(([x, y]) => ({ x, y })));
+  const across = (u: number): number => {
+    if (u <= intrados.from) return extrados.from;
+    if (u >= intrados.to) return extrados.to;
+    const foot = intrados.at(u);
+    const tangent = intrados.derivative(u);
+    const ahead = (point: Point): number => (point.x - foot.x) * tangent.x + (point.y - foot.y) * tangent.y;
+    return extrados.root(
+      (v) => ahead(extrados.at(v)),
+      (v) => {
+        const { x, y } = extrados.derivative(v);
+        return x * tangent.x + y * tangent.y;
+      },
+    );
   };
+  refuseThinned(intrados, extrados, across);
+  return { intrados, extrados, across };
+}
+
+/** Places at which the two faces are held against each other. */
+const LOOKS = 50;
+
+function refuseThinned(intrados: SmoothCurve, extrados: SmoothCurve, across: (u: number) => number): void {
+  for (let i = 0; i <= LOOKS; i++) {
+    const u = (intrados.to * i) / LOOKS;
+    const foot = intrados.at(u);
+    const normal = intrados.normal(u);
+    const top = extrados.at(across(u));
+    if ((top.x - foot.x) * normal.x + (top.y - foot.y) * normal.y > 0) continue;
+    throw new ProblemError([
+      {
+        path: 'profile.extrados',
+        value: `near x ${Number(foot.x.toPrecision(3))} m`,
+        wrong: 'the extrados falls inside the intrados',
+        right: 'give the points of the back of the ring, above and outside those of the intrados',
+      },
+    ]);
+  }
+}
+
+function runningRight(points: readonly (readonly [number, number])[], path: string): Problem[] {
+  return points.flatMap(([x], i): Problem[] => {
+    const before = points[i - 1];
+    if (before === undefined || x > before[0]) return [];
+    return [
+      {
+        path: `${path}[${i}]`,
+        value: `x ${x} m after x ${before[0]} m`,
+        wrong: 'measured points run from the left springing to the right one',
+        right: 'give each point a greater x than the one before',
+      },
+    ];
+  });
 }

@@ -3,6 +3,7 @@ import type { Profile } from '../job/schema.ts';
 import { ProblemError } from '../job/problem.ts';
 import type { Curve, OffsettableCurve } from './curve.ts';
 import { flatFaces } from './flat.ts';
+import { measuredFaces } from './measured.ts';
 import type { Point } from './point.ts';
 import { intradosCurves } from './profile.ts';
 
@@ -30,6 +31,7 @@ const JOINED = 1e-12;
 /** @throws ProblemError when the profile cannot be built or the ring is too thick for its curvature. */
 export function ringPieces(profile: Profile, thickness: Thickness): Piece[] {
   if (profile.shape === 'flat') return joined([flatFaces(profile, thickness.crown)]);
+  if (profile.shape === 'measured' && profile.extrados) return joined([measuredFaces(profile, profile.extrados)]);
   const curves = intradosCurves(profile);
   refuseTooThick(curves, Math.max(thickness.crown, thickness.springing));
   return joined(thickness.crown === thickness.springing ? evenPieces(curves, thickness.crown) : taperedPieces(curves, thickness));

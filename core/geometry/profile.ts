@@ -7,7 +7,7 @@ import { ProblemError, type Problem } from '../job/problem.ts';
 import type { Profile, ProfileShape } from '../job/schema.ts';
 import { Arc } from './arc.ts';
 import type { OffsettableCurve } from './curve.ts';
-import { measuredCurves } from './measured.ts';
+import { measuredIntrados } from './measured.ts';
 import { SmoothCurve } from './smooth-curve.ts';
 
 type Of<Shape extends ProfileShape> = Extract<Profile, { readonly shape: Shape }>;
@@ -54,7 +54,7 @@ function curvesWithLevelSprings(profile: CurvedProfile): OffsettableCurve[] {
     case 'catenary':
       return catenary(profile);
     case 'measured':
-      return measuredCurves(profile.points);
+      return [measuredIntrados(profile)];
   }
 }
 

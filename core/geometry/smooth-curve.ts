@@ -20,6 +20,8 @@ const SPANS_OF_A_FACE = 8;
 const NEWTON_STEPS = 60;
 /** Halvings that take any bracket below the rounding of its ends. */
 const HALVINGS = 60;
+/** Share of a span by which rounding may miss its end. */
+const ON_SPAN_END = 1e-9;
 /** Places looked at in each span before a highest or sharpest place is closed in on. */
 const LOOKS_PER_SPAN = 8;
 
@@ -27,7 +29,7 @@ const LOOKS_PER_SPAN = 8;
 export class SmoothCurve implements OffsettableCurve {
   private lengthTable: Float64Array | null = null;
 
-  /** @param spans stretches of equal parameter within which the curve has all its derivatives and turns little. */
+  /** @param spans stretches of equal parameter; within each the curve has all its derivatives and turns little. */
   constructor(
     readonly from: number,
     readonly to: number,
@@ -68,16 +70,15 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   moments(u0: number, u1: number, origin: Point): Moments {
-    const parts = this.partsOf(u0, u1);
-    const rule = this.ruleFor((u1 - u0) / parts);
-    const half = (u1 - u0) / parts / 2;
     let area = 0;
     let sx = 0;
     let sy = 0;
-    for (let part = 0; part < parts; part++) {
-      const middle = u0 + (2 * part + 1) * half;
+    for (let a = u0; a !== u1; ) {
+      const b = this.withinSpan(a, u1);
+      const rule = this.ruleFor(b - a);
+      const half = (b - a) / 2;
       for (let i = 0; i < rule.points; i++) {
-        const { x, y, dx, dy } = this.jet(middle + half * (rule.nodes[i] as number));
+        const { x, y, dx, dy } = this.jet(a + half + half * (rule.nodes[i] as number));
         const weight = half * (rule.weights[i] as number);
         const px = x - origin.x;
         const py = y - origin.y;
@@ -85,6 +86,7 @@ export class SmoothCurve implements OffsettableCurve {
         sx += (weight * px * px * dy) / 2;
         sy -= (weight * py * py * dx) / 2;
       }
+      a = b;
     }
     return { area, sx, sy };
   }
@@ -94,7 +96,7 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   parameterAtLength(length: number): number {
-    return this.solve(
+    return this.root(
       (u) => this.lengthTo(u) - length,
       (u) => {
         const { dx, dy } = this.jet(u);
@@ -104,7 +106,7 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   parameterAtX(x: number): number {
-    const u = this.solve(
+    const u = this.root(
       (v) => this.jet(v).x - x,
       (v) => this.jet(v).dx,
     );
@@ -227,16 +229,27 @@ export class SmoothCurve implements OffsettableCurve {
     return this.direction * half * length;
   }
 
+  /** How many spans' worth of parameter lies between two places, one at least. */
   private partsOf(u0: number, u1: number): number {
-    return Math.max(1, Math.ceil((this.spans * Math.abs(u1 - u0)) / Math.abs(this.to - this.from) - 1e-9));
+    return Math.max(1, Math.ceil((this.spans * Math.abs(u1 - u0)) / Math.abs(this.to - this.from) - ON_SPAN_END));
+  }
+
+  /** From `a` towards `b`: `b` itself, or the nearest end of a span on the way. */
+  private withinSpan(a: number, b: number): number {
+    const span = (this.to - this.from) / this.spans;
+    const here = (a - this.from) / span;
+    const there = (b - this.from) / span;
+    const next = there > here ? Math.floor(here + ON_SPAN_END) + 1 : Math.ceil(here - ON_SPAN_END) - 1;
+    const onTheWay = there > here ? next < there - ON_SPAN_END : next > there + ON_SPAN_END;
+    return onTheWay ? this.from + next * span : b;
   }
 
   private ruleFor(stretch: number): GaussRule {
     return 2 * this.spans * Math.abs(stretch) <= Math.abs(this.to - this.from) ? SIX_POINTS : TEN_POINTS;
   }
 
-  /** Root of a function that changes sign once along the curve: Newton, and halving where Newton leaves the bracket. */
-  private solve(value: (u: number) => number, slope: (u: number) => number): number {
+  /** Where a function that rises through zero once along the curve is zero, or the end beyond which it is. */
+  root(value: (u: number) => number, slope: (u: number) => number): number {
     let low = this.from;
     let high = this.to;
     const atLow = value(low);
