@@ -21,7 +21,7 @@ export function sheetToSvg(sheet: Sheet, options: SvgOptions = {}): string {
   const used = new Set<string>();
   return [
     '<?xml version="1.0" encoding="UTF-8"?>',
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${number(paper.width)}mm" height="${number(paper.height)}mm" viewBox="0 0 ${number(paper.width)} ${number(paper.height)}" role="img" aria-labelledby="drawing-title drawing-description" font-family="'DejaVu Sans', sans-serif" text-rendering="geometricPrecision" font-kerning="none" stroke-linejoin="round">`,
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${number(paper.width)}mm" height="${number(paper.height)}mm" viewBox="0 0 ${number(paper.width)} ${number(paper.height)}" role="img" aria-labelledby="drawing-title drawing-description" font-family="'DejaVu Sans', sans-serif" text-rendering="geometricPrecision" stroke-linejoin="round" style="font-kerning:none">`,
     `<title id="drawing-title">${escapeText(title)}</title>`,
     `<desc id="drawing-description">${escapeText(description)}</desc>`,
     ...(options.fonts === undefined ? [] : [fontFaces(options.fonts)]),
