@@ -2,10 +2,11 @@ import { mount } from 'svelte';
 import App from './App.svelte';
 import './app.css';
 import { host } from './host/host.ts';
+import { NO_PHOTOGRAPHS } from './session/document.ts';
 import { firstJob } from './session/samples.ts';
 import { Session } from './session/session.svelte.ts';
 import { theme } from './session/theme.svelte.ts';
 
 theme.start();
-const session = new Session({ job: firstJob(), photographs: new Map(), file: null });
+const session = new Session({ job: firstJob(), photographs: NO_PHOTOGRAPHS, file: null });
 mount(App, { target: document.querySelector('#app')!, props: { session, host } });

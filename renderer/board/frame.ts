@@ -1,5 +1,9 @@
 /** Runs `work` with the latest of what was handed in, once a frame, however often it is called. */
-export function onceAFrame<Input>(work: (input: Input) => void): { later: (input: Input) => void; now: () => void; forget: () => void } {
+export function onceAFrame<Input>(work: (input: Input) => void): {
+  later: (input: Input) => void;
+  now: () => void;
+  forget: () => void;
+} {
   let waiting: { readonly input: Input } | null = null;
   let request = 0;
   const now = (): void => {

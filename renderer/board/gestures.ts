@@ -89,7 +89,8 @@ export function listen(board: HTMLElement, target: GestureTarget): () => void {
     const after = Math.hypot(pixel.x - other.at.x, pixel.y - other.at.y);
     pan((pixel.x - pointer.at.x) / 2, (pixel.y - pointer.at.y) / 2);
     panning.now();
-    if (before > 0 && after > 0) target.zoom(after / before, { x: (pixel.x + other.at.x) / 2, y: (pixel.y + other.at.y) / 2 });
+    if (before > 0 && after > 0)
+      target.zoom(after / before, { x: (pixel.x + other.at.x) / 2, y: (pixel.y + other.at.y) / 2 });
     pointer.at = pixel;
     pointer.moved = true;
     other.moved = true;
@@ -142,4 +143,5 @@ export function listen(board: HTMLElement, target: GestureTarget): () => void {
 const reachOf = ({ pointerType }: PointerEvent): number => (pointerType === 'touch' ? REACH.touch : REACH.mouse);
 
 /** Fields and buttons that lie over the board, other than its handles, keep their own pointers. */
-const isTyping = (target: EventTarget | null): boolean => target instanceof Element && target.closest('[data-over-board]') !== null;
+const isTyping = (target: EventTarget | null): boolean =>
+  target instanceof Element && target.closest('[data-over-board]') !== null;

@@ -6,7 +6,10 @@ export function boardTheme(dark: boolean, forced: boolean): Theme {
   const marks = THEMES['black-and-white'];
   const ground = systemColour('Canvas');
   const ink = systemColour('CanvasText');
-  const translated = Object.entries(marks).map(([token, colour]) => [token, colour === '#FFFFFF' ? ground : colour && ink]);
+  const translated = Object.entries(marks).map(([token, colour]) => [
+    token,
+    colour === '#FFFFFF' ? ground : colour && ink,
+  ]);
   return Object.fromEntries(translated) as Record<Token, string | null>;
 }
 

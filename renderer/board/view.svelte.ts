@@ -16,8 +16,8 @@ import { itemAt } from './hit.ts';
 import { boardTheme } from './theme.ts';
 import { fitted, millimetresPerMetre, panned, resized, toMetres, toPixels, zoomed, type Viewport } from './viewport.ts';
 
-/** Room left round the drawing, px; below it for the legend. */
-const INSETS = { left: 28, top: 28, right: 28, bottom: 72 };
+/** Room left round the drawing, px. */
+const MARGIN = 28;
 /** Zoom for a press of a key or button. */
 const ZOOM_STEP = 1.25;
 /** A drawing smaller than this share of what would fit is fitted anew. */
@@ -33,9 +33,13 @@ export interface Entry {
 export class BoardView {
   readonly #session: Session;
   #viewport = $state.raw<Viewport | null>(null);
+  /** Height of the legend along the lower edge, px. */
+  foot = $state(0);
   /** The person has not moved the paper, so it may be moved to keep the whole drawing in sight. */
   #follows = true;
   entry = $state.raw<Entry | null>(null);
+  /** The last move was by pointer: the mark of the keyboard's place keeps out of its way. */
+  byPointer = $state(false);
   /** The handle that is being moved. */
   active = $state.raw<string | null>(null);
 
@@ -43,6 +47,7 @@ export class BoardView {
     this.#session = session;
   }
 
+  readonly #insets = $derived({ left: MARGIN, top: MARGIN, right: MARGIN, bottom: MARGIN + this.foot });
   readonly viewport: Viewport | null = $derived(this.#viewport);
   readonly #scale: number | null = $derived(this.#viewport === null ? null : millimetresPerMetre(this.#viewport));
   readonly scene: Scene | null = $derived.by(() => {
@@ -72,7 +77,7 @@ export class BoardView {
   fit(width = this.#viewport?.width ?? 0, height = this.#viewport?.height ?? 0): void {
     const { assessed } = this.#session;
     this.#follows = true;
-    this.#viewport = fitted(width, height, INSETS, (scale) =>
+    this.#viewport = fitted(width, height, this.#insets, (scale) =>
       assessed === null ? null : elevation(assessed, { millimetresPerMetre: scale }).bounds,
     );
   }
@@ -85,8 +90,9 @@ export class BoardView {
     const { x: left, y: top } = toPixels(viewport, { x: bounds.left, y: bounds.top });
     const { x: right, y: bottom } = toPixels(viewport, { x: bounds.right, y: bounds.bottom });
     const { width, height } = viewport;
-    const inSight = left >= 0 && top >= 0 && right <= width && bottom <= height - INSETS.bottom / 2;
-    const share = Math.max((right - left) / (width - INSETS.left - INSETS.right), (bottom - top) / (height - INSETS.top - INSETS.bottom));
+    const lower = height - this.foot - MARGIN / 2;
+    const inSight = left >= 0 && top >= 0 && right <= width && bottom <= lower;
+    const share = Math.max((right - left) / (width - 2 * MARGIN), (bottom - top) / (lower - MARGIN));
     if (!inSight || share < SMALLEST_SHARE) this.fit();
   }
 
@@ -117,6 +123,7 @@ export class BoardView {
   /** Takes hold of a handle: it follows the pointer by as much as the pointer moves. */
   grip(handle: Handle, start: Point): Grip {
     const drag = this.#session.drag();
+    this.byPointer = true;
     const scale = this.#viewport?.scale ?? 1;
     this.active = handle.id;
     this.entry = null;

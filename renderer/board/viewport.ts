@@ -29,13 +29,23 @@ export interface Insets {
 const LEAST_SCALE = 2;
 const MOST_SCALE = 20_000;
 
-export const toPixels = ({ scale, x, y }: Viewport, point: Point): Point => ({ x: x + point.x * scale, y: y - point.y * scale });
+export const toPixels = ({ scale, x, y }: Viewport, point: Point): Point => ({
+  x: x + point.x * scale,
+  y: y - point.y * scale,
+});
 
-export const toMetres = ({ scale, x, y }: Viewport, pixel: Point): Point => ({ x: (pixel.x - x) / scale, y: (y - pixel.y) / scale });
+export const toMetres = ({ scale, x, y }: Viewport, pixel: Point): Point => ({
+  x: (pixel.x - x) / scale,
+  y: (y - pixel.y) / scale,
+});
 
 export const millimetresPerMetre = ({ scale }: Viewport): number => scale / PIXELS_PER_MILLIMETRE;
 
-export const panned = (viewport: Viewport, dx: number, dy: number): Viewport => ({ ...viewport, x: viewport.x + dx, y: viewport.y + dy });
+export const panned = (viewport: Viewport, dx: number, dy: number): Viewport => ({
+  ...viewport,
+  x: viewport.x + dx,
+  y: viewport.y + dy,
+});
 
 /** Zoomed by `factor` so that what lies at `pixel` stays there. */
 export function zoomed(viewport: Viewport, factor: number, pixel: Point): Viewport {
@@ -46,7 +56,13 @@ export function zoomed(viewport: Viewport, factor: number, pixel: Point): Viewpo
 
 /** The same place in the middle of a window of another size. */
 export function resized(viewport: Viewport, width: number, height: number): Viewport {
-  return { ...viewport, width, height, x: viewport.x + (width - viewport.width) / 2, y: viewport.y + (height - viewport.height) / 2 };
+  return {
+    ...viewport,
+    width,
+    height,
+    x: viewport.x + (width - viewport.width) / 2,
+    y: viewport.y + (height - viewport.height) / 2,
+  };
 }
 
 /**
@@ -65,9 +81,15 @@ export function fitted(
   for (let i = 0; i < FIT_ROUNDS; i++) {
     const box = boundsAt(millimetresPerMetre(viewport));
     if (box === null) break;
-    const factor = Math.min(roomX / ((box.right - box.left) * viewport.scale), roomY / ((box.top - box.bottom) * viewport.scale));
+    const factor = Math.min(
+      roomX / ((box.right - box.left) * viewport.scale),
+      roomY / ((box.top - box.bottom) * viewport.scale),
+    );
     // Half the way in the last rounds would oscillate no less; a little under is always safe.
-    const scale = Math.min(MOST_SCALE, Math.max(LEAST_SCALE, viewport.scale * (factor < 1 ? factor * 0.995 : factor ** 0.9)));
+    const scale = Math.min(
+      MOST_SCALE,
+      Math.max(LEAST_SCALE, viewport.scale * (factor < 1 ? factor * 0.995 : factor ** 0.9)),
+    );
     viewport = {
       ...viewport,
       scale,

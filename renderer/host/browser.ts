@@ -6,7 +6,11 @@ import { fileOpen, fileSave, supported } from 'browser-fs-access';
 import { version } from '../../package.json';
 import type { FileRef, Host, OpenedFile, Outcome } from '../../app/host.ts';
 
-const JOB_KINDS = { description: 'Skewback job', extensions: ['.skewback', '.json'], mimeTypes: ['application/x-skewback', 'application/json'] };
+const JOB_KINDS = {
+  description: 'Skewback job',
+  extensions: ['.skewback', '.json'],
+  mimeTypes: ['application/x-skewback', 'application/json'],
+};
 const NEW_JOB_KIND = { description: 'Skewback job', extensions: ['.skewback'], mimeTypes: ['application/x-skewback'] };
 
 /** Files that the browser lets this page write again, by the id of their reference. */
@@ -51,7 +55,12 @@ async function writeNew(fileName: string, bytes: Uint8Array): Promise<FileRef> {
 
 async function writeAgain(file: FileRef, bytes: Uint8Array): Promise<FileRef> {
   const handle = handles.get(file.id);
-  await fileSave(blobOf(bytes, 'application/x-skewback'), { ...NEW_JOB_KIND, fileName: file.name }, handle ?? null, true);
+  await fileSave(
+    blobOf(bytes, 'application/x-skewback'),
+    { ...NEW_JOB_KIND, fileName: file.name },
+    handle ?? null,
+    true,
+  );
   return file;
 }
 
@@ -72,7 +81,8 @@ export const browserHost = {
   shell: 'browser',
   versions: { app: version, engine: engine() },
   open: () => settled(openFile, 'The file could not be opened.'),
-  save: (file, bytes) => settled(() => writeAgain(file, bytes), `${file.name} could not be saved; it is still as it was.`),
+  save: (file, bytes) =>
+    settled(() => writeAgain(file, bytes), `${file.name} could not be saved; it is still as it was.`),
   saveAs: (suggestedName, bytes) => settled(() => writeNew(suggestedName, bytes), 'The file could not be saved.'),
   exportFile: ({ name, mime, bytes }) => settled(() => exportFile(name, mime, bytes), `${name} could not be written.`),
 } satisfies Host;

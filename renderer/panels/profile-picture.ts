@@ -27,7 +27,12 @@ export function shapePicture(shape: DrawnShape): SceneItem[] {
 function drawn(profile: Profile, thickness: number): SceneItem[] {
   const usual = usualVoussoirs(profile.shape);
   const voussoirs = 2 * Math.round((usual * VOUSSOIRS_SHOWN) / 2) + (usual % 2);
-  const ring = buildRing({ profile, thickness: { crown: thickness, springing: thickness }, voussoirs, joints: 'radial' });
+  const ring = buildRing({
+    profile,
+    thickness: { crown: thickness, springing: thickness },
+    voussoirs,
+    joints: 'radial',
+  });
   const outline = bodyOutline(ring, 0, ring.blocks.length);
   return [
     outlined('stone', outline),

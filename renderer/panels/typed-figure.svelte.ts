@@ -17,9 +17,10 @@ export const shownFigure = (value: number | null, kind: QuantityKind): string =>
   value === null ? '' : formatQuantity(value, kind, SHOWN, { figures: 'exact' });
 
 /** The reading of entries brings the mathematics with it: loaded when a field is first entered. */
-const reader = (): Promise<typeof import('../../core/quantity/parse.ts')> => import('../../core/quantity/parse.ts');
+const reader = () => import('../../core/quantity/parse.ts');
 
-const sentence = (text: string): string => `${text.charAt(0).toUpperCase()}${text.slice(1)}${/[.!?]$/.test(text) ? '' : '.'}`;
+const sentence = (text: string): string =>
+  `${text.charAt(0).toUpperCase()}${text.slice(1)}${/[.!?]$/.test(text) ? '' : '.'}`;
 
 export class TypedFigure {
   readonly #source: () => FigureSource;

@@ -1,7 +1,7 @@
 /** What can be asked of the window from the bar, the keyboard and the shell's menu: one list for all three. */
 import type { Command, Host } from '../../app/host.ts';
 
-export interface Shortcut {
+interface Shortcut {
   readonly key: string;
   readonly shift: boolean;
   /** For screen readers and the pointer's hint: `Ctrl+Shift+Z`. */
@@ -15,7 +15,7 @@ const shortcut = (key: string, shift = false): Shortcut => ({
   shown: mac ? `${shift ? '⇧' : ''}⌘${key.toUpperCase()}` : `Ctrl+${shift ? 'Shift+' : ''}${key.toUpperCase()}`,
 });
 
-export const SHORTCUTS: Readonly<Partial<Record<Command, Shortcut>>> = {
+const SHORTCUTS: Readonly<Partial<Record<Command, Shortcut>>> = {
   new: shortcut('n'),
   open: shortcut('o'),
   save: shortcut('s'),
@@ -25,12 +25,21 @@ export const SHORTCUTS: Readonly<Partial<Record<Command, Shortcut>>> = {
   redo: shortcut('z', true),
 };
 
+/** How a command's key is shown; browsers keep Ctrl+N for themselves. */
+export function keyShown(command: Command, shell: Host['shell']): string | undefined {
+  return command === 'new' && shell === 'browser' ? (mac ? '⌥N' : 'Alt+N') : SHORTCUTS[command]?.shown;
+}
+
 /** Plain keys on the board, where nothing is being typed. */
-const BOARD_KEYS: Readonly<Record<string, Command>> = { '+': 'zoom-in', '=': 'zoom-in', '-': 'zoom-out', '0': 'zoom-to-fit' };
+const BOARD_KEYS: Readonly<Record<string, Command>> = {
+  '+': 'zoom-in',
+  '=': 'zoom-in',
+  '-': 'zoom-out',
+  '0': 'zoom-to-fit',
+};
 
 /**
- * The command that a key press asks for. Browsers keep Ctrl+N for themselves, so Alt+N asks for it too; the browser's own
- * zoom keys are left to it.
+ * The command that a key press asks for. Alt+N stands in for the browser's own Ctrl+N, and its zoom keys are left to it.
  */
 export function commandOf(event: KeyboardEvent, shell: Host['shell']): Command | null {
   if (event.altKey) return event.code === 'KeyN' && !event.ctrlKey && !event.metaKey ? 'new' : null;

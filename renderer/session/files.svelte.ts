@@ -4,6 +4,7 @@ import { readJobFile, writeJobFile } from '../../core/job/archive.ts';
 import type { DrawnShape } from '../../core/job/edits.ts';
 import { freshJob } from '../../core/job/fresh.ts';
 import { problemSentence } from '../../core/job/problem.ts';
+import { NO_PHOTOGRAPHS } from './document.ts';
 import { jobFileName } from './names.ts';
 import type { Session } from './session.svelte.ts';
 
@@ -33,7 +34,7 @@ export class Files {
 
   async begin(shape: DrawnShape): Promise<void> {
     if (!(await this.mayLeave())) return;
-    this.#session.open({ job: freshJob(shape), photographs: new Map(), file: null });
+    this.#session.open({ job: freshJob(shape), photographs: NO_PHOTOGRAPHS, file: null });
     this.notice = null;
   }
 

@@ -2,7 +2,19 @@
  * Every figure of a scheme that a person can enter: where it stands in the document, what it is called, how it is read
  * and how it is set. The panels list them, the board opens them where they are lettered; both through this one table.
  */
-import { setAbove, setAskedSafety, setBreadth, setLoad, setMasonry, setRise, setShapeMeasure, setSpan, setSway, setThickness, setVoussoirs } from '../../core/job/edits.ts';
+import {
+  setAbove,
+  setAskedSafety,
+  setBreadth,
+  setLoad,
+  setMasonry,
+  setRise,
+  setShapeMeasure,
+  setSpan,
+  setSway,
+  setThickness,
+  setVoussoirs,
+} from '../../core/job/edits.ts';
 import type { ShapeMeasure } from '../../core/job/edits.ts';
 import type { ResolvedLoad, ResolvedProfile, ResolvedScheme } from '../../core/job/defaults.ts';
 import type { Scheme } from '../../core/job/schema.ts';
@@ -49,7 +61,7 @@ function shapeMeasure(measure: ShapeMeasure, name: string, kind: QuantityKind, o
   };
 }
 
-const STEP = shapeMeasure('step', 'Right springing higher by', 'length', true);
+const STEP = shapeMeasure('step', 'Right end higher by', 'length', true);
 const HAUNCH_ANGLE = shapeMeasure('haunchAngle', 'Haunch angle', 'angle', false);
 const SKEWBACK = shapeMeasure('skewbackAngle', 'Skewback', 'angle', false);
 const CAMBER = shapeMeasure('camber', 'Camber', 'length', false);
@@ -133,6 +145,10 @@ const LOAD_FIELDS = {
     ['force', 'Force', 'force'],
     ['x', 'From mid-span', 'length'],
   ],
+  axle: [
+    ['force', 'Force', 'force'],
+    ['x', 'From mid-span', 'length'],
+  ],
   strip: [
     ['intensity', 'Intensity', 'intensity'],
     ['from', 'From', 'length'],
@@ -156,7 +172,7 @@ export function loadMeasures({ id, kind }: ResolvedLoad): readonly Measure[] {
 
 export const SWAY: Measure = {
   path: 'sway',
-  name: 'Sideways, share of gravity',
+  name: 'Sway, share of gravity',
   kind: 'plain',
   read: ({ sway }) => sway,
   set: (scheme, value) => setSway(scheme, value === 0 ? undefined : value),
@@ -165,7 +181,7 @@ export const SWAY: Measure = {
 
 export const ASKED_SAFETY: Measure = {
   path: 'asked.geometricSafety',
-  name: 'Geometric safety asked for',
+  name: 'Safety asked for',
   kind: 'plain',
   read: ({ asked }) => asked.geometricSafety,
   set: setAskedSafety,

@@ -9,6 +9,7 @@ import { patchScheme } from '../../core/job/edits.ts';
 import type { Arch, Job, Scheme } from '../../core/job/schema.ts';
 import type { FileRef } from '../../app/host.ts';
 import { outcomeOf } from './assessed.ts';
+import { NO_PHOTOGRAPHS, type OpenDocument } from './document.ts';
 import { historyOf, presentOf, recorded, redone, stepToRedo, stepToUndo, undone, type History } from './history.ts';
 import type { Measure } from './measures.ts';
 import { tried, triedEntry, type Trial } from './trial.ts';
@@ -18,13 +19,6 @@ export interface Drag {
   preview(edit: (scheme: Scheme) => Scheme): void;
   release(name: string): void;
   abandon(): void;
-}
-
-export interface OpenDocument {
-  readonly job: Job;
-  readonly photographs: Photographs;
-  /** Null for a document that no file holds. */
-  readonly file: FileRef | null;
 }
 
 interface Place {
@@ -41,7 +35,7 @@ export class Session {
   /** The document as its file has it. */
   #kept = $state.raw<Job | null>(null);
   file = $state.raw<FileRef | null>(null);
-  photographs: Photographs = new Map();
+  photographs: Photographs = NO_PHOTOGRAPHS;
   /** What is pointed at, on the board and in the panels alike. */
   selection = $state.raw<About | null>(null);
   /** Counts the documents opened, so that a view can tell another document from an edit. */
@@ -152,7 +146,11 @@ export class Session {
     this.refusal = trial.ok ? '' : trial.reason;
     if (!trial.ok) return;
     const { arch, scheme } = this;
-    this.#history = recorded(this.#history, name, patchScheme(this.settled, arch.id, scheme.id, () => trial.scheme));
+    this.#history = recorded(
+      this.#history,
+      name,
+      patchScheme(this.settled, arch.id, scheme.id, () => trial.scheme),
+    );
   }
 
   #step(step: (history: History) => History): void {

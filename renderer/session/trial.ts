@@ -31,7 +31,10 @@ export function triedEntry(arch: Arch, scheme: Scheme, measure: Measure, value: 
   const taken = measure.read(resolveScheme(next).resolved);
   if (taken !== null && Math.abs(taken - value) > SAME * Math.abs(value)) {
     const limit = formatQuantity(taken, measure.kind, SHOWN, { figures: 4 });
-    return { ok: false, reason: taken < value ? `At most ${limit} is possible here.` : `At least ${limit} is needed here.` };
+    return {
+      ok: false,
+      reason: taken < value ? `At most ${limit} is possible here.` : `At least ${limit} is needed here.`,
+    };
   }
   return tried(arch, scheme, () => next);
 }
