@@ -18,6 +18,8 @@ export interface CrackMark {
 
 export interface Explanation {
   readonly pattern: CrackPattern;
+  /** Other movements that open the very same joints, which no mark can tell from it. */
+  readonly alike: readonly CrackPattern[];
   /** 0 … 1 */
   readonly score: number;
   /** Marks that it explains at least by half. */
@@ -28,7 +30,7 @@ export interface Explanation {
 
 export interface CrackReading {
   readonly verdict: 'too-few-marks' | 'no-pattern' | 'none-fits' | 'undecided' | 'clear';
-  /** Best first, one for each kind of movement. */
+  /** Best first; each kind of movement stands once, beside those that crack alike. */
   readonly ranking: readonly Explanation[];
   readonly because: string;
 }
@@ -44,7 +46,7 @@ const FITS = 0.5;
 const APART = 0.1;
 
 export function readCracks(marks: readonly CrackMark[], patterns: readonly CrackPattern[], joints: number): CrackReading {
-  const ranking = bestOfEachKind(patterns.map((pattern) => explain(marks, pattern, joints)));
+  const ranking = together(bestOfEachKind(patterns.map((pattern) => explain(marks, pattern, joints))));
   return { ...verdict(marks.length, ranking), ranking };
 }
 
@@ -56,16 +58,20 @@ function verdict(marks: number, ranking: readonly Explanation[]): Pick<CrackRead
   if (marks < FEWEST_MARKS) {
     return { verdict: 'too-few-marks', because: `${marks === 0 ? 'No opening is' : 'One opening alone is'} marked; mark at least ${FEWEST_MARKS}, better all that are seen, before a movement is read from them.` };
   }
-  const name = movementInWords(best.pattern);
+  const name = explanationInWords(best);
   const explained = `${best.explains} of ${marks} marks`;
   if (best.score < FITS) {
     return { verdict: 'none-fits', because: `No single movement explains the marks; the nearest, ${name}, explains ${explained}. Look for more than one movement, for older repairs, or for marks on the wrong face.` };
   }
   if (second !== undefined && best.score - second.score < APART) {
-    return { verdict: 'undecided', because: `The marks speak for ${name} (${explained}), but ${movementInWords(second.pattern)} explains them nearly as well; they cannot be told apart from these marks.` };
+    return { verdict: 'undecided', because: `The marks speak for ${name} (${explained}), but ${explanationInWords(second)} explains them nearly as well; they cannot be told apart from these marks.` };
   }
   return { verdict: 'clear', because: `The marks speak for ${name}: it explains ${explained}. They do not say when it happened, nor whether it goes on.` };
 }
+
+/** The movement, and those that crack alike. */
+export const explanationInWords = ({ pattern, alike }: Explanation): string =>
+  [pattern, ...alike].map(movementInWords).join(' or ');
 
 export function movementInWords({ kind, x }: CrackPattern): string {
   switch (kind) {
@@ -103,6 +109,17 @@ function bestOfEachKind(all: readonly Explanation[]): Explanation[] {
   return [...best.values()].sort((p, q) => q.score - p.score);
 }
 
+/** Puts explanations that ask for the very same openings into one. */
+function together(ranking: readonly Explanation[]): Explanation[] {
+  const byOpenings = new Map<string, Explanation>();
+  for (const explanation of ranking) {
+    const key = explanation.pattern.openings.map(({ joint, side }) => `${joint} ${side}`).join(', ');
+    const held = byOpenings.get(key);
+    byOpenings.set(key, held ? { ...held, alike: [...held.alike, explanation.pattern] } : explanation);
+  }
+  return [...byOpenings.values()];
+}
+
 function explain(marks: readonly CrackMark[], pattern: CrackPattern, joints: number): Explanation {
   const { openings } = pattern;
   const sorted = [...marks].sort((p, q) => p.joint - q.joint);
@@ -118,7 +135,7 @@ function explain(marks: readonly CrackMark[], pattern: CrackPattern, joints: num
   const explains = pairs.filter((pair) => pair >= 0.5).length;
   const unseen = openings.length - explains;
   const score = marks.length === 0 ? 0 : sum / (marks.length + UNSEEN * unseen);
-  return { pattern, score, explains, unseen };
+  return { pattern, alike: [], score, explains, unseen };
 }
 
 /** Pairs marks with openings, both in order along the ring and each used once, for the greatest sum of credits. */

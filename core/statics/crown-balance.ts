@@ -7,7 +7,8 @@ import { midpoint, type Point } from '../geometry/point.ts';
 import type { RingGeometry } from '../geometry/ring.ts';
 import type { Block } from '../loading/forces.ts';
 import { crossing } from './line.ts';
-import { momentAbout, ringSystem, type RingSystem } from './system.ts';
+import { stateThrough } from './states.ts';
+import { ringSystem, type RingSystem } from './system.ts';
 
 export interface CrownBalance {
   /** kN, at the left springing. */
@@ -38,7 +39,8 @@ export function crownBalance(
   if (crown <= 0 || crown >= ring.joints.length - 1) return null;
   const system = ring === whole ? wholeSystem : ringSystem(ring.joints, load(ring));
   const last = system.joints - 1;
-  const state = throughMidRing(system, [0, crown, last]);
+  const atMidRing = (joint: number) => ({ joint, share: 0.5 });
+  const state = stateThrough(system, [atMidRing(0), atMidRing(crown), atMidRing(last)]);
   if (state === null) return null;
   const middles = [0, crown, last].map((j) => {
     const joint = ring.joints[j];
@@ -51,38 +53,10 @@ export function crownBalance(
   }
   const { force } = system.frame;
   return {
-    horizontal: state[0] * force,
-    leftVertical: state[1] * force,
-    rightVertical: -(state[1] + (system.sums.fy[last] as number)) * force,
+    horizontal: (state[0] as number) * force,
+    leftVertical: (state[1] as number) * force,
+    rightVertical: -((state[1] as number) + (system.sums.fy[last] as number)) * force,
     lever: middles[1].y - (middles[0].y + middles[2].y) / 2,
     inside,
   };
-}
-
-/** The state whose resultant passes mid-ring at three joints, by Cramer's rule; null when those three stand in one line. */
-function throughMidRing(system: RingSystem, joints: readonly [number, number, number]): [number, number, number] | null {
-  const rows = joints.map((j) => {
-    const px = ((system.ix[j] as number) + (system.ex[j] as number)) / 2;
-    const py = ((system.iy[j] as number) + (system.ey[j] as number)) / 2;
-    return { px, py, moment: -momentAbout(system.sums, j, px, py) };
-  }) as [Row, Row, Row];
-  const [p, q, r] = rows;
-  // py·X − px·Y + M = moment at each; subtracting the first removes M
-  const a = q.py - p.py;
-  const b = -(q.px - p.px);
-  const c = r.py - p.py;
-  const d = -(r.px - p.px);
-  const determinant = a * d - b * c;
-  if (Math.abs(determinant) < 1e-12) return null;
-  const e = q.moment - p.moment;
-  const f = r.moment - p.moment;
-  const x = (e * d - b * f) / determinant;
-  const y = (a * f - e * c) / determinant;
-  return [x, y, p.moment - p.py * x + p.px * y];
-}
-
-interface Row {
-  readonly px: number;
-  readonly py: number;
-  readonly moment: number;
 }

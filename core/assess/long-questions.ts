@@ -1,0 +1,82 @@
+/** Questions that may take longer than a frame, for a worker: each reports its progress and can be given up. */
+import { addLoad } from '../loading/loads.ts';
+import { layersHeight } from '../loading/above.ts';
+import { topLevel } from '../loading/load-ring.ts';
+import { skyOver } from '../loading/sky.ts';
+import type { BlockForces } from '../loading/forces.ts';
+import type { Hinge } from '../statics/hinge.ts';
+import { greatestMultiplier } from '../statics/multiplier.ts';
+import { remainingSpread, type Direction, type RemainingSpread } from '../statics/remaining-spread.ts';
+import { sumsOf } from '../statics/system.ts';
+import type { BuiltScheme } from './build.ts';
+import { plainHinges } from './printed.ts';
+
+/** Called with the share of the way done; returning false gives the question up. */
+export type Progress = (share: number) => boolean;
+
+export interface Axle {
+  /** kN on the whole breadth. */
+  readonly force: number;
+  /** Length of the wheels' print along the span, m. */
+  readonly patch: number;
+  /** Spread to each side for each metre down through the fill. */
+  readonly dispersal: number;
+}
+
+export interface AxlePlace {
+  readonly x: number;
+  /** Null where the ring holds any multiple of the axle there. */
+  readonly factor: number | null;
+  readonly hinges: readonly Hinge[];
+}
+
+export interface AxleEnvelope {
+  readonly places: readonly AxlePlace[];
+  /** The place with the least factor; null where no place has a limit. */
+  readonly worst: AxlePlace | null;
+}
+
+/** The load factor of an axle at even steps across the ring; null when the ring does not stand by itself or it was given up. */
+export function axleEnvelope(built: BuiltScheme, axle: Axle, steps: number, progress: Progress): AxleEnvelope | null {
+  const { system, ring, blocks, resolved } = built;
+  const sky = skyOver(ring);
+  const surface = topLevel(ring, resolved) + layersHeight(resolved.above.layers);
+  const ground = { sky, breadth: resolved.breadth, surface };
+  const places: AxlePlace[] = [];
+  for (let i = 0; i < steps; i++) {
+    if (!progress(i / steps)) return null;
+    const x = sky.left.x + ((sky.right.x - sky.left.x) * (i + 0.5)) / steps;
+    const forces: BlockForces = blocks.map(() => []);
+    addLoad(forces, ground, { id: 'axle', name: 'axle', action: 'variable', kind: 'axle', x, ...axle });
+    const set = sumsOf(
+      system.frame,
+      forces.map((block) => ({ forces: block })),
+      (block) => block.forces,
+    );
+    const answer = greatestMultiplier(system, set);
+    if (answer.kind === 'never-stands') return null;
+    places.push(
+      answer.kind === 'limit'
+        ? { x, factor: answer.factor, hinges: plainHinges(answer.hinges) }
+        : { x, factor: null, hinges: [] },
+    );
+  }
+  let worst: AxlePlace | null = null;
+  for (const place of places) {
+    if (place.factor !== null && (worst?.factor == null || place.factor < worst.factor)) worst = place;
+  }
+  return { places, worst };
+}
+
+/** Steps to the furthest movement asked for: at twice as many the answer changes in the third figure at most. */
+const SPREAD_STEPS = 200;
+
+/** How far the supports can still part (or go in another direction) before the ring falls; see `remainingSpread`. */
+export function spreadLeft(
+  { joints, blocks }: BuiltScheme,
+  direction: Direction,
+  furthest: number,
+  progress: Progress,
+): RemainingSpread | null {
+  return remainingSpread(joints, blocks, direction, furthest, SPREAD_STEPS, progress);
+}
