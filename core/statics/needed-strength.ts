@@ -24,8 +24,12 @@ export interface NeededStrength {
 /** Relative gap between the two bounds that counts as met; the figure is printed to three figures. */
 const MET = 1e-7;
 const MOST_PLANES = 600;
-/** How far towards the last trial to go where the trial itself lies on an edge and its stress has no bound. */
-const SHY_OF_EDGE = 0.9;
+/**
+ * Near an edge the stress has no bound, and a plane laid there says no more than the edge does. A trial is drawn back
+ * towards the best state until its stress is at most this many times the best: its plane then still cuts the trial off,
+ * because it rises all the way from the best state.
+ */
+const STEEPEST = 4;
 
 /** @param inside a state whose line stays clear of every edge; @param breadth m. */
 export function neededStrength(system: RingSystem, inside: State, breadth: number): NeededStrength {
@@ -90,7 +94,7 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
     if (top.stress - (outcome.s[3] as number) <= MET * top.stress) break;
     let trial = outcome.s.slice(0, 3);
     let found = worst(trial);
-    for (let share = SHY_OF_EDGE; !Number.isFinite(found.stress); share *= SHY_OF_EDGE) {
+    for (let share = 0.5; found.stress > STEEPEST * top.stress; share /= 2) {
       trial = best.map((value, k) => value + share * ((outcome.s[k] as number) - value));
       found = worst(trial);
     }
