@@ -41,9 +41,10 @@ function findings(result: SchemeAssessment, { asked }: ResolvedScheme): Row[] {
 
 function given({ ring, masonry, above, breadth, sway }: ResolvedScheme, length: LengthText): Row[] {
   const rows: Row[] = [
-    ['Ring', `${ring.voussoirs} voussoirs, ${ring.joints} joints`],
+    ['Ring', `${entered(ring.voussoirs)} voussoirs, ${ring.joints} joints`],
     ['Thickness and breadth', `${length(ring.thickness)} and ${length(breadth)} m`],
-    ['Masonry', `${masonry.name}, ${entered(masonry.unitWeight)} kN/m³`],
+    ['Masonry', masonry.name],
+    ['Unit weight', `${entered(masonry.unitWeight)} kN/m³`],
   ];
   if (above.kind === 'none') rows.push(['Above', 'nothing']);
   else rows.push(['Above', `${above.kind} ${length(above.height)} m, ${entered(above.unitWeight)} kN/m³`]);

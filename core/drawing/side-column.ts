@@ -46,7 +46,7 @@ export function drawSideColumn(
   column.keepFree(-kept);
   column.space(Math.min(2, column.room - kept));
   drawLegend(column, resolved, result, small ? 1.8 : 2.5);
-  const loads = key.map(({ mark, meaning }) => `${mark}  ${meaning}`);
+  const loads = key.map(({ mark, meaning }) => `${mark} – ${meaning}`);
   drawList(column, 'legend', 'Loads', loads);
   drawList(
     column,
