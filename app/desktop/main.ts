@@ -22,9 +22,9 @@ function start(): void {
   const userData = app.getPath('userData');
   lockDown(session.defaultSession);
   protocol.handle(PAGE_SCHEME, async (request) => {
-    const { origin, host, pathname } = new URL(request.url);
-    const own = origin === PAGE_ORIGIN || `${PAGE_SCHEME}://${host}` === PAGE_ORIGIN;
-    const { status, headers, body } = await pageFile(join(programFolder, 'dist', 'renderer'), own ? pathname : '');
+    const { host, pathname } = new URL(request.url);
+    const path = `${PAGE_SCHEME}://${host}` === PAGE_ORIGIN ? pathname : '';
+    const { status, headers, body } = await pageFile(join(programFolder, 'dist', 'renderer'), path);
     return new Response(Buffer.from(body), { status, headers });
   });
 
