@@ -19,7 +19,7 @@ import { neededStrength } from '../statics/needed-strength.ts';
 import { neededFriction } from '../statics/sliding.ts';
 import { ringSystem } from '../statics/system.ts';
 import { thinnestRing } from '../statics/thinnest-ring.ts';
-import { thrustRange, type ThrustAnswer } from '../statics/thrust.ts';
+import { thrustRange, type Extreme, type ThrustAnswer } from '../statics/thrust.ts';
 import { usableThrust } from '../statics/usable-thrust.ts';
 import type { Assessment, SchemeAssessment } from './assessment.ts';
 import { buildScheme, withThickness, type BuiltScheme } from './build.ts';
@@ -96,9 +96,7 @@ function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): Sc
       stands ? usableThrust(system, { friction: masonry.friction, strength: masonry.strength, breadth }) : null,
     ),
     reactions:
-      springings === null
-        ? null
-        : { left: printedReaction(springings.left), right: printedReaction(springings.right) },
+      springings === null ? null : { left: printedReaction(springings.left), right: printedReaction(springings.right) },
     geometricSafety: stands && middle !== null && middle.share > 0 ? 1 / middle.share : null,
     thinnestRing: thinnest(built, middle),
     loadFactors: loadFactors(built),
@@ -115,7 +113,7 @@ function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare 
   const hinges = answer.stands ? (middle?.touches ?? []) : answer.mechanism;
   const numbers = [...new Set(hinges.map(({ joint }) => joint))];
   const governing = built.joints[numbers[0] ?? 0];
-  const inside = answer.stands ? (middle?.state ?? null) : null;
+  const inside = answer.stands ? stateClearOfEdges(answer.least, middle) : null;
   return [
     compressionOnly({
       stands: answer.stands,
@@ -128,6 +126,13 @@ function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare 
     sliding(masonry.friction, answer.stands ? neededFriction(system) : null),
     crushing(masonry.strength, inside === null ? null : neededStrength(system, inside, breadth)),
   ];
+}
+
+/** A state whose line stays clear of every face: the middle one, or the least thrust and a good push along the joints' middles. */
+function stateClearOfEdges(least: Extreme | null, middle: MiddleShare | null): Float64Array | null {
+  if (middle === null || middle.state !== null) return middle?.state ?? null;
+  const { direction } = middle;
+  return least && direction && least.state.map((value, k) => value + (direction[k] as number));
 }
 
 /** Rings are searched up to this share of the span: thicker than any that was ever turned. */

@@ -45,6 +45,6 @@ export function withThickness(resolved: ResolvedScheme, thickness: number): Reso
   const springingThickness = even ? thickness : (ring.springingThickness * thickness) / ring.thickness;
   const evenRing = { ...resolved, ring: { ...ring, thickness, springingThickness } };
   if (profile.shape !== 'measured') return evenRing;
-  const { extrados: _measured, ...soffit } = profile;
-  return { ...evenRing, profile: soffit };
+  const { shape, points, step } = profile;
+  return { ...evenRing, profile: { shape, points, step } };
 }

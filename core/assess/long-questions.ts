@@ -61,11 +61,9 @@ export function axleEnvelope(built: BuiltScheme, axle: Axle, steps: number, prog
         : { x, factor: null, hinges: [] },
     );
   }
-  let worst: AxlePlace | null = null;
-  for (const place of places) {
-    if (place.factor !== null && (worst?.factor == null || place.factor < worst.factor)) worst = place;
-  }
-  return { places, worst };
+  const limit = (place: AxlePlace): number => place.factor ?? Infinity;
+  const worst = places.reduce((least, place) => (limit(place) < limit(least) ? place : least));
+  return { places, worst: worst.factor === null ? null : worst };
 }
 
 /** Steps to the furthest movement asked for: at twice as many the answer changes in the third figure at most. */

@@ -45,7 +45,11 @@ const FITS = 0.5;
 /** Two scores closer than this cannot be told apart by marks placed to the nearest joint. */
 const APART = 0.1;
 
-export function readCracks(marks: readonly CrackMark[], patterns: readonly CrackPattern[], joints: number): CrackReading {
+export function readCracks(
+  marks: readonly CrackMark[],
+  patterns: readonly CrackPattern[],
+  joints: number,
+): CrackReading {
   const ranking = together(bestOfEachKind(patterns.map((pattern) => explain(marks, pattern, joints))));
   return { ...verdict(marks.length, ranking), ranking };
 }
@@ -53,20 +57,36 @@ export function readCracks(marks: readonly CrackMark[], patterns: readonly Crack
 function verdict(marks: number, ranking: readonly Explanation[]): Pick<CrackReading, 'verdict' | 'because'> {
   const [best, second] = ranking;
   if (best === undefined) {
-    return { verdict: 'no-pattern', because: 'The ring as entered holds no line of thrust, so no movement can be read from its cracks; check what was measured first.' };
+    return {
+      verdict: 'no-pattern',
+      because:
+        'The ring as entered holds no line of thrust, so no movement can be read from its cracks; check what was measured first.',
+    };
   }
   if (marks < FEWEST_MARKS) {
-    return { verdict: 'too-few-marks', because: `${marks === 0 ? 'No opening is' : 'One opening alone is'} marked; mark at least ${FEWEST_MARKS}, better all that are seen, before a movement is read from them.` };
+    return {
+      verdict: 'too-few-marks',
+      because: `${marks === 0 ? 'No opening is' : 'One opening alone is'} marked; mark at least ${FEWEST_MARKS}, better all that are seen, before a movement is read from them.`,
+    };
   }
   const name = explanationInWords(best);
   const explained = `${best.explains} of ${marks} marks`;
   if (best.score < FITS) {
-    return { verdict: 'none-fits', because: `No single movement explains the marks; the nearest, ${name}, explains ${explained}. Look for more than one movement, for older repairs, or for marks on the wrong face.` };
+    return {
+      verdict: 'none-fits',
+      because: `No single movement explains the marks; the nearest, ${name}, explains ${explained}. Look for more than one movement, for older repairs, or for marks on the wrong face.`,
+    };
   }
   if (second !== undefined && best.score - second.score < APART) {
-    return { verdict: 'undecided', because: `The marks speak for ${name} (${explained}), but ${explanationInWords(second)} explains them nearly as well; they cannot be told apart from these marks.` };
+    return {
+      verdict: 'undecided',
+      because: `The marks speak for ${name} (${explained}), but ${explanationInWords(second)} explains them nearly as well; they cannot be told apart from these marks.`,
+    };
   }
-  return { verdict: 'clear', because: `The marks speak for ${name}: it explains ${explained}. They do not say when it happened, nor whether it goes on.` };
+  return {
+    verdict: 'clear',
+    because: `The marks speak for ${name}: it explains ${explained}. They do not say when it happened, nor whether it goes on.`,
+  };
 }
 
 /** The movement, and those that crack alike. */
@@ -139,7 +159,11 @@ function explain(marks: readonly CrackMark[], pattern: CrackPattern, joints: num
 }
 
 /** Pairs marks with openings, both in order along the ring and each used once, for the greatest sum of credits. */
-function bestPairs(marks: readonly CrackMark[], openings: number, credit: (mark: CrackMark, i: number) => number): number[] {
+function bestPairs(
+  marks: readonly CrackMark[],
+  openings: number,
+  credit: (mark: CrackMark, i: number) => number,
+): number[] {
   let row: { sum: number; pairs: number[] }[] = Array.from({ length: openings + 1 }, () => ({ sum: 0, pairs: [] }));
   for (const mark of marks) {
     const next = [{ sum: row[0]?.sum ?? 0, pairs: row[0]?.pairs ?? [] }];

@@ -14,7 +14,11 @@ export function sliding(
 ): Check {
   const common = { id: 'ring.sliding', title: 'Sliding at the joints', unit: '', source: FRICTION_SOURCE } as const;
   if (needed === null) {
-    return { ...common, ...nothing(friction), because: 'No line of thrust fits in the ring, so there is none to hold against sliding.' };
+    return {
+      ...common,
+      ...nothing(friction),
+      because: 'No line of thrust fits in the ring, so there is none to hold against sliding.',
+    };
   }
   const { coefficient, joints } = needed;
   const found = { demand: coefficient, limit: friction, where: jointsInWords(joints), joints };
@@ -46,11 +50,25 @@ export function crushing(
   strength: number | null,
   needed: { readonly strength: number; readonly joint: number } | null,
 ): Check {
-  const common = { id: 'ring.crushing', title: 'Crushing at the joints', unit: 'MPa', source: CRUSHING_SOURCE } as const;
+  const common = {
+    id: 'ring.crushing',
+    title: 'Crushing at the joints',
+    unit: 'MPa',
+    source: CRUSHING_SOURCE,
+  } as const;
   if (needed === null) {
-    return { ...common, ...nothing(strength), because: 'No line of thrust fits in the ring, so there is no stress to hold against its strength.' };
+    return {
+      ...common,
+      ...nothing(strength),
+      because: 'No line of thrust fits in the ring, so there is no stress to hold against its strength.',
+    };
   }
-  const found = { demand: needed.strength, limit: strength, where: jointsInWords([needed.joint]), joints: [needed.joint] };
+  const found = {
+    demand: needed.strength,
+    limit: strength,
+    where: jointsInWords([needed.joint]),
+    joints: [needed.joint],
+  };
   if (strength === null) {
     return {
       ...common,

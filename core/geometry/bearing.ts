@@ -28,7 +28,13 @@ export function bearingJoints(joints: readonly Joint[], { lostMortar, backingLev
 }
 
 /** How far a joint runs on into the backing: to its top, or to the plumb line over the springing's extrados. */
-function backedLength({ intrados, extrados }: Joint, length: number, level: number, left: number, right: number): number {
+function backedLength(
+  { intrados, extrados }: Joint,
+  length: number,
+  level: number,
+  left: number,
+  right: number,
+): number {
   const dx = (extrados.x - intrados.x) / length;
   const dy = (extrados.y - intrados.y) / length;
   const up = dy > 0 ? (level - extrados.y) / dy : Infinity;

@@ -19,7 +19,8 @@ export function flatFaces(profile: Extract<Profile, { readonly shape: 'flat' }>,
   // where the joint through a point of the level soffit meets the level top: straight up, or along the ray from below
   const topX = (x: number, y: number): number => (vertical ? x : (x * (top + depth)) / (y + depth));
   const topEnd = topX(a, 0);
-  const intrados: Curve = camber === 0 ? new Straight(raised({ x: -a, y: 0 }), raised({ x: a, y: 0 })) : circleOver(a, camber).sheared(slope);
+  const intrados: Curve =
+    camber === 0 ? new Straight(raised({ x: -a, y: 0 }), raised({ x: a, y: 0 })) : circleOver(a, camber).sheared(slope);
   const extrados = new Straight(raised({ x: -topEnd, y: top }), raised({ x: topEnd, y: top }));
   const across = (u: number): number => {
     const point = intrados.at(u);

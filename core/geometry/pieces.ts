@@ -11,7 +11,7 @@ export interface Piece {
   readonly intrados: Curve;
   readonly extrados: Curve;
   /** The extrados parameter of the joint that stands square on the intrados at u, or as the shape's joints run. */
-  across(u: number): number;
+  readonly across: (u: number) => number;
   /** Length of the intrados, m. */
   readonly length: number;
   /** Where the extrados really begins and ends: at an apex it runs on, or stops short, to meet its neighbour. */
@@ -34,7 +34,9 @@ export function ringPieces(profile: Profile, thickness: Thickness): Piece[] {
   if (profile.shape === 'measured' && profile.extrados) return joined([measuredFaces(profile, profile.extrados)]);
   const curves = intradosCurves(profile);
   refuseTooThick(curves, Math.max(thickness.crown, thickness.springing));
-  return joined(thickness.crown === thickness.springing ? evenPieces(curves, thickness.crown) : taperedPieces(curves, thickness));
+  return joined(
+    thickness.crown === thickness.springing ? evenPieces(curves, thickness.crown) : taperedPieces(curves, thickness),
+  );
 }
 
 function refuseTooThick(curves: readonly OffsettableCurve[], thickness: number): void {

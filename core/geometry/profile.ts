@@ -159,8 +159,7 @@ function fourCentred({ span, rise, haunchRadius: r, haunchAngle }: Of<'four-cent
     });
   }
   const theta = (haunchAngle * Math.PI) / 180;
-  const k =
-    ((a - r) ** 2 + rise * rise - r * r) / (2 * (r + (a - r) * Math.cos(theta) - rise * Math.sin(theta)));
+  const k = ((a - r) ** 2 + rise * rise - r * r) / (2 * (r + (a - r) * Math.cos(theta) - rise * Math.sin(theta)));
   const centre = { x: r - a + k * Math.cos(theta), y: -k * Math.sin(theta) };
   if (!(k > 0) || !(centre.x >= 0)) {
     refuse({

@@ -188,8 +188,7 @@ function plumb(pieces: readonly Piece[], square: Station): Station {
   ]);
 }
 
-const clampBetween = (u: number, a: number, b: number): number =>
-  Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
+const clampBetween = (u: number, a: number, b: number): number => Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
 
 /** Visits the stretches of one face between two places, left to right, each on one curve. */
 function eachStretch(
@@ -241,19 +240,20 @@ function faceMoments(
 
 function skyFaceOf(pieces: readonly Piece[], left: Station, right: Station, { back }: RingBlock): SkyFace | null {
   const origin = left.intrados;
-  const open: { curve: Curve; a: number; b: number }[] = [];
-  let clipped = false;
+  const stretches: { curve: Curve; a: number; b: number; whole: boolean }[] = [];
   eachStretch(pieces, 'extrados', left, right, (curve, u0, u1) => {
     const { from, to } = curve.skyward;
     const a = clampBetween(u0, from, to);
     const b = clampBetween(u1, from, to);
-    if (a !== u0 || b !== u1) clipped = true;
-    if (a !== b) open.push({ curve, a, b });
+    stretches.push({ curve, a, b, whole: a === u0 && b === u1 });
   });
+  const open = stretches.filter(({ a, b }) => a !== b);
   const first = open[0];
   const last = open[open.length - 1];
   if (!first || !last) return null;
-  if (!clipped) return { from: left.extrados, to: right.extrados, moments: back, origin };
+  if (stretches.every(({ whole }) => whole)) {
+    return { from: left.extrados, to: right.extrados, moments: back, origin };
+  }
   let moments: Moments = { area: 0, sx: 0, sy: 0 };
   for (const { curve, a, b } of open) {
     const { area, sx, sy } = curve.moments(a, b, origin);

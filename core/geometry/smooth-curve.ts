@@ -73,7 +73,7 @@ export class SmoothCurve implements OffsettableCurve {
     let area = 0;
     let sx = 0;
     let sy = 0;
-    for (let a = u0; a !== u1; ) {
+    for (let a = u0; a !== u1;) {
       const b = this.withinSpan(a, u1);
       const rule = this.ruleFor(b - a);
       const half = (b - a) / 2;
@@ -272,8 +272,7 @@ export class SmoothCurve implements OffsettableCurve {
   }
 }
 
-const clampBetween = (u: number, a: number, b: number): number =>
-  Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
+const clampBetween = (u: number, a: number, b: number): number => Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
 
 /** Between a place where `holds` is true and one where it is not: the last parameter at which it still is, by halving. */
 function lastWhere(holds: (u: number) => boolean, yes: number, no: number): number {

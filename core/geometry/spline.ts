@@ -11,8 +11,18 @@ import { SmoothCurve } from './smooth-curve.ts';
 export function splineThrough(points: readonly Point[]): SmoothCurve {
   const chords = points.slice(1).map((b, i) => Math.hypot(b.x - (points[i] as Point).x, b.y - (points[i] as Point).y));
   const [start, end] = endDirections(points);
-  const x = clampedSpline(chords, points.map((p) => p.x), start.x, end.x);
-  const y = clampedSpline(chords, points.map((p) => p.y), start.y, end.y);
+  const x = clampedSpline(
+    chords,
+    points.map((p) => p.x),
+    start.x,
+    end.x,
+  );
+  const y = clampedSpline(
+    chords,
+    points.map((p) => p.y),
+    start.y,
+    end.y,
+  );
   const last = points.length - 1;
   return new SmoothCurve(
     0,
@@ -87,7 +97,9 @@ function clampedSpline(
     const low = at(second, i);
     const high = at(second, i + 1);
     return [
-      rest * at(values, i) + share * at(values, i + 1) + (((rest ** 3 - rest) * low + (share ** 3 - share) * high) * h * h) / 6,
+      rest * at(values, i) +
+        share * at(values, i + 1) +
+        (((rest ** 3 - rest) * low + (share ** 3 - share) * high) * h * h) / 6,
       slope(i) + (((3 * share * share - 1) * high - (3 * rest * rest - 1) * low) * h) / 6,
       rest * low + share * high,
     ];

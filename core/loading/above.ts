@@ -80,7 +80,14 @@ export function takeOutOpenings(
   return openings.flatMap(({ from, to, sill, head }, i): Problem[] => {
     const path = `openings[${i}]`;
     if (!(from < to) || !(sill < head)) {
-      return [{ path, value: `${from} to ${to}, ${sill} to ${head} m`, wrong: 'the opening has no size', right: 'let it end after it begins and its head stand over its sill' }];
+      return [
+        {
+          path,
+          value: `${from} to ${to}, ${sill} to ${head} m`,
+          wrong: 'the opening has no size',
+          right: 'let it end after it begins and its head stand over its sill',
+        },
+      ];
     }
     const back = highestBack(sky, from, to);
     if (sill < back || head > top) {
@@ -138,6 +145,12 @@ export function addSidePressure(
     const pressure = top * (b - a) - (b * b - a * a) / 2;
     const moment = (top * (b * b - a * a)) / 2 - (b ** 3 - a ** 3) / 3;
     if (pressure === 0) continue;
-    forces[k]?.push({ x: (face.from.x + face.to.x) / 2, y: moment / pressure, fx: scale * pressure, fy: 0, from: ABOVE });
+    forces[k]?.push({
+      x: (face.from.x + face.to.x) / 2,
+      y: moment / pressure,
+      fx: scale * pressure,
+      fy: 0,
+      from: ABOVE,
+    });
   }
 }

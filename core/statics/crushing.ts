@@ -39,12 +39,14 @@ const MOST_TANGENTS = 400;
 /** Minimise c·s over the rows given and the crushing limit of every joint. */
 export function minimiseUncrushed(rows: Rows, limit: CrushingLimit, c: readonly number[]): SimplexOutcome {
   const d = rows.unknowns;
-  const a = new Float64Array((rows.count + MOST_TANGENTS) * d);
-  const b = new Float64Array(rows.count + MOST_TANGENTS);
+  const joints = limit.length.length;
+  const a = new Float64Array((rows.count + joints + MOST_TANGENTS) * d);
+  const b = new Float64Array(rows.count + joints + MOST_TANGENTS);
   a.set(rows.a);
   b.set(rows.b);
   let count = rows.count;
-  let outcome = withThrustBound(limit, { unknowns: d, count, a, b }, c);
+  for (let j = 0; j < joints; j++) setGreatestForce(limit, j, a, b, count++, d);
+  let outcome = minimise({ unknowns: d, count, a, b }, c);
   for (let tangents = 0; tangents < MOST_TANGENTS && outcome.kind === 'optimal'; tangents++) {
     const worst = mostCrushed(limit, outcome.s);
     if (worst === null) break;
@@ -55,22 +57,17 @@ export function minimiseUncrushed(rows: Rows, limit: CrushingLimit, c: readonly 
   return outcome;
 }
 
-/** No joint can carry more than f·b·t, so an unbounded start is bounded by the tangent at that force on the first joint. */
-function withThrustBound(limit: CrushingLimit, rows: Rows, c: readonly number[]): SimplexOutcome {
-  const outcome = minimise(rows, c);
-  if (outcome.kind !== 'unbounded') return outcome;
-  const d = rows.unknowns;
-  const joints = limit.length.length;
-  const count = rows.count + joints;
-  const a = new Float64Array(count * d);
-  const b = new Float64Array(count);
-  a.set(rows.a.subarray(0, rows.count * d));
-  b.set(rows.b.subarray(0, rows.count));
-  for (let j = 0; j < joints; j++) {
-    for (let k = 0; k < 3; k++) a[(rows.count + j) * d + k] = -(limit.normal.a[3 * j + k] as number);
-    b[rows.count + j] = (limit.normal.b[j] as number) - limit.perLength * (limit.length[j] as number);
-  }
-  return minimise({ unknowns: d, count, a, b }, c);
+/** N ≤ f b t: what both branches of the limit come to together; it bounds the thrust before any tangent does. */
+function setGreatestForce(
+  limit: CrushingLimit,
+  j: number,
+  a: Float64Array,
+  b: Float64Array,
+  row: number,
+  d: number,
+): void {
+  for (let k = 0; k < 3; k++) a[row * d + k] = -(limit.normal.a[3 * j + k] as number);
+  b[row] = (limit.normal.b[j] as number) - limit.perLength * (limit.length[j] as number);
 }
 
 interface Crushed {

@@ -14,6 +14,8 @@ export interface MiddleShare {
   readonly share: number;
   /** (X0, Y0, M0), scaled: the line that stays nearest the middle; null when it is only approached as the thrust grows. */
   readonly state: Float64Array | null;
+  /** Where the state goes as the thrust grows, when the share is only approached so; else null. */
+  readonly direction: Float64Array | null;
   /** Where that line touches the shrunken joints, left to right. */
   readonly touches: readonly Hinge[];
 }
@@ -24,5 +26,6 @@ export function leastMiddleShare(system: RingSystem): MiddleShare | null {
   if (least === null) return null;
   // rows +m and −m are the extrados and the intrados of the shrunken joint, in the order of the line's own rows
   const touching = least.ratio === 0 ? [] : least.basis.filter(({ row }) => row < 2 * system.joints);
-  return { share: least.ratio, state: least.state, touches: hingesOf(touching).map(({ hinge }) => hinge) };
+  const { ratio: share, state, direction } = least;
+  return { share, state, direction, touches: hingesOf(touching).map(({ hinge }) => hinge) };
 }

@@ -26,7 +26,12 @@ export interface Multiplier {
 }
 
 export type SimplexOutcome =
-  | { readonly kind: 'optimal'; readonly s: Float64Array; readonly value: number; readonly basis: readonly Multiplier[] }
+  | {
+      readonly kind: 'optimal';
+      readonly s: Float64Array;
+      readonly value: number;
+      readonly basis: readonly Multiplier[];
+    }
   /** The value has no bound, or none within the box. */
   | { readonly kind: 'unbounded' }
   /** Σ y a = 0 with Σ y b > 0: no s obeys these rows together. */
@@ -180,7 +185,14 @@ function rowToLeave(w: Float64Array, y: Float64Array, inverse: Float64Array, d: 
   return best;
 }
 
-function comesBefore(i: number, j: number, w: Float64Array, y: Float64Array, inverse: Float64Array, d: number): boolean {
+function comesBefore(
+  i: number,
+  j: number,
+  w: Float64Array,
+  y: Float64Array,
+  inverse: Float64Array,
+  d: number,
+): boolean {
   const wi = w[i] as number;
   const wj = w[j] as number;
   let left = (y[i] as number) / wi;

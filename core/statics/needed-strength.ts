@@ -76,7 +76,8 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
     const byNormal = scale * (2 * slope - slope * slope * t);
     const byMoment = scale * 2 * sign * slope * slope;
     for (let k = 0; k < 3; k++) {
-      a[4 * count + k] = -byNormal * (normal.a[3 * joint + k] as number) - byMoment * (moment.a[3 * joint + k] as number);
+      a[4 * count + k] =
+        -byNormal * (normal.a[3 * joint + k] as number) - byMoment * (moment.a[3 * joint + k] as number);
     }
     a[4 * count + 3] = scale;
     b[count] = byNormal * (normal.b[joint] as number) + byMoment * (moment.b[joint] as number);
@@ -101,7 +102,8 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
     // a plane at every joint that stands out there beyond its neighbours and the bound from below
     for (let j = 0; j < length.length; j++) {
       const here = stressAt(trial, j);
-      const peak = here >= stressAt(trial, Math.max(0, j - 1)) && here >= stressAt(trial, Math.min(length.length - 1, j + 1));
+      const peak =
+        here >= stressAt(trial, Math.max(0, j - 1)) && here >= stressAt(trial, Math.min(length.length - 1, j + 1));
       if (peak && here > (outcome.s[3] as number)) addPlane(trial, j);
     }
     if (found.stress < top.stress) [best, top] = [trial, found];

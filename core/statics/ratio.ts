@@ -21,6 +21,8 @@ export interface LeastRatio {
   readonly ratio: number;
   /** (X0, Y0, M0), scaled; null when the ratio is only approached as the thrust grows without limit. */
   readonly state: Float64Array | null;
+  /** Where the state goes as the thrust grows, when the ratio is only approached so; else null. */
+  readonly direction: Float64Array | null;
   /** Multipliers of the last programme: rows 2j and 2j + 1 for +p and −p at joint j, then the hard rows. */
   readonly basis: readonly Multiplier[];
 }
@@ -65,7 +67,7 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
     }
     const settled = best !== null && attained >= best.ratio * (1 - SETTLED);
     if (best === null || attained < best.ratio) {
-      best = { ratio: attained, state: outcome.s.slice(0, 3), basis: outcome.basis };
+      best = { ratio: attained, state: outcome.s.slice(0, 3), direction: null, basis: outcome.basis };
     }
     if (settled || attained === 0) break;
     ratio = attained;
@@ -85,9 +87,7 @@ export function leastSlack(
   start?: readonly Multiplier[],
 ): { slack: number; basis: readonly Multiplier[] } {
   const outcome = minimise(slackRows(p, q, 1, weights), [0, 0, 0, 1], start);
-  return outcome.kind === 'optimal'
-    ? { slack: outcome.value, basis: outcome.basis }
-    : { slack: -Infinity, basis: [] };
+  return outcome.kind === 'optimal' ? { slack: outcome.value, basis: outcome.basis } : { slack: -Infinity, basis: [] };
 }
 
 /** The least ratio of a thrust so great that the loads do not count: the forms without their loads, the q summing to one. */
@@ -106,13 +106,13 @@ function ratioAtEndlessThrust(p: JointForms, q: JointForms, weights: Float64Arra
   b[extra] = 1;
   b[extra + 1] = -1;
   const unloaded = new Float64Array(joints);
-  const least = leastRatio(
-    { a: p.a, b: unloaded },
-    { a: q.a, b: unloaded },
-    weights,
-    { unknowns: 3, count: extra + 2, a, b },
-  );
-  return least && { ...least, state: null };
+  const least = leastRatio({ a: p.a, b: unloaded }, { a: q.a, b: unloaded }, weights, {
+    unknowns: 3,
+    count: extra + 2,
+    a,
+    b,
+  });
+  return least && { ...least, state: null, direction: least.state };
 }
 
 /** The forms' values for a state, kept away from zero by a sliver of their mean so that no joint is left without slack. */

@@ -61,7 +61,7 @@ export function remainingSpread(
   if (answer === null) return null;
   const places: SpreadPlace[] = [placeOf(body, answer)];
   let stride = step;
-  for (let halved = 0; body.moved < furthest * (1 - 1e-12) && halved <= HALVINGS; ) {
+  for (let halved = 0; body.moved < furthest * (1 - 1e-12) && halved <= HALVINGS;) {
     if (!onProgress(body.moved / furthest)) return null;
     const next = moveBy(body, answer.rows, direction, Math.min(stride, furthest - body.moved));
     const there = next && hingesNow(next, direction);
@@ -140,7 +140,11 @@ const placed = ({ cos, sin, about, to }: Placement, p: Point): Point => {
 /** The ring after the left support has gone one stride further; null when the two middle parts cannot reach. */
 function moveBy(ring: MovedRing, hinges: readonly Hinge[], direction: Direction, stride: number): MovedRing | null {
   const lines = middleLines(ring);
-  const [first, second, third] = hinges.map(({ joint, side }) => (lines[joint] as Joint)[side]) as [Point, Point, Point];
+  const [first, second, third] = hinges.map(({ joint, side }) => (lines[joint] as Joint)[side]) as [
+    Point,
+    Point,
+    Point,
+  ];
   const [j1, j2, j3] = hinges.map(({ joint }) => joint) as [number, number, number];
   const shifted = { x: first.x + direction.x * stride, y: first.y + direction.y * stride };
   const apex = thirdCorner(shifted, third, first, second, third);
@@ -149,9 +153,12 @@ function moveBy(ring: MovedRing, hinges: readonly Hinge[], direction: Direction,
   const between12 = turned(first, second, shifted, apex);
   const between23 = turned(second, third, apex, third);
   // blocks left of the first hinge go with the left support, those right of the third stay
-  const of = (block: number): Placement | null => (block < j1 ? left : block < j2 ? between12 : block < j3 ? between23 : null);
+  const of = (block: number): Placement | null =>
+    block < j1 ? left : block < j2 ? between12 : block < j3 ? between23 : null;
   const face = (joint: Joint, placement: Placement | null): Joint =>
-    placement === null ? joint : { intrados: placed(placement, joint.intrados), extrados: placed(placement, joint.extrados) };
+    placement === null
+      ? joint
+      : { intrados: placed(placement, joint.intrados), extrados: placed(placement, joint.extrados) };
   return {
     moved: ring.moved + stride,
     leftFaces: ring.leftFaces.map((joint, j) => face(joint, of(j - 1))),

@@ -19,7 +19,14 @@ export function lineRows(system: RingSystem, columns: readonly Sums[] = []): Row
   }
   return { unknowns: d, count, a, b };
 
-  function setMomentRow(to: Float64Array, limit: Float64Array, row: number, sign: number, px: number, py: number): void {
+  function setMomentRow(
+    to: Float64Array,
+    limit: Float64Array,
+    row: number,
+    sign: number,
+    px: number,
+    py: number,
+  ): void {
     const j = row >> 1;
     const at = row * d;
     to[at] = sign * py;
@@ -33,7 +40,10 @@ export function lineRows(system: RingSystem, columns: readonly Sums[] = []): Row
 export const hingeOfRow = (row: number): Hinge => ({ joint: row >> 1, side: row % 2 === 0 ? 'extrados' : 'intrados' });
 
 /** The hinges of a basis or certificate, left to right, with their relative rotations. */
-export function hingesOf(multipliers: readonly Multiplier[], rotationless = 1e-9): { hinge: Hinge; rotation: number }[] {
+export function hingesOf(
+  multipliers: readonly Multiplier[],
+  rotationless = 1e-9,
+): { hinge: Hinge; rotation: number }[] {
   const largest = multipliers.reduce((most, { y }) => Math.max(most, y), 0);
   return multipliers
     .filter(({ y }) => y > rotationless * largest)

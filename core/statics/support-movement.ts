@@ -39,7 +39,11 @@ export type MovementAnswer =
   | { readonly kind: 'no-line' }
   | { readonly kind: 'locked' };
 
-export function answerToMovement(system: RingSystem, joints: readonly Joint[], movement: SupportMovement): MovementAnswer {
+export function answerToMovement(
+  system: RingSystem,
+  joints: readonly Joint[],
+  movement: SupportMovement,
+): MovementAnswer {
   const c = workOnState(system, joints, movement);
   const size = Math.max(...c.map(Math.abs));
   if (size === 0) throw new RangeError('a movement that moves nothing has no answer');
