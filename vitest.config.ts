@@ -31,7 +31,19 @@ export default defineConfig({
       },
       {
         plugins: [svelte({ configFile })],
-        optimizeDeps: { include: ['svelte', 'svelte/reactivity', 'konva', 'vitest-browser-svelte'] },
+        optimizeDeps: {
+          include: [
+            'svelte',
+            'svelte/reactivity',
+            'konva/lib/Layer.js',
+            'konva/lib/Shape.js',
+            'konva/lib/Stage.js',
+            'vitest-browser-svelte',
+            'browser-fs-access',
+            'mathjs',
+            'valibot',
+          ],
+        },
         test: {
           name: 'browser',
           include: ['tests/**/*.browser.test.ts'],

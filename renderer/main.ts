@@ -3,10 +3,15 @@ import App from './App.svelte';
 import './app.css';
 import { host } from './host/host.ts';
 import { NO_PHOTOGRAPHS } from './session/document.ts';
+import { BoardView } from './board/view.svelte.ts';
+import { Files } from './session/files.svelte.ts';
 import { firstJob } from './session/samples.ts';
 import { Session } from './session/session.svelte.ts';
 import { theme } from './session/theme.svelte.ts';
 
 theme.start();
 const session = new Session({ job: firstJob(), photographs: NO_PHOTOGRAPHS, file: null });
-mount(App, { target: document.querySelector('#app')!, props: { session, host } });
+mount(App, {
+  target: document.querySelector('#app')!,
+  props: { session, files: new Files(session, host), view: new BoardView(session), host },
+});

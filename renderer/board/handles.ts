@@ -10,11 +10,12 @@ import type { ResolvedLoad } from '../../core/job/defaults.ts';
 import {
   crownHeightOf,
   moveCrown,
-  moveExtrados,
   moveLoad,
   moveSpringing,
   resizeStrip,
   setAbove,
+  setLoad,
+  setThickness,
 } from '../../core/job/edits.ts';
 import type { Scheme } from '../../core/job/schema.ts';
 
@@ -86,8 +87,9 @@ function thicknessHandle({ resolved, ring }: AssessedScheme): Handle {
     at: ring.crownExtrados,
     axis: 'y',
     value: resolved.ring.thickness,
-    rate: 1,
-    set: (scheme, value) => moveExtrados(scheme, { x: 0, y: crownHeightOf(scheme.profile) + value }),
+    // Over a point the back stands further above the soffit than the ring is thick.
+    rate: resolved.ring.thickness / (ring.crownExtrados.y - ring.crownIntrados.y),
+    set: setThickness,
     path: 'ring.thickness',
   };
 }
@@ -142,13 +144,26 @@ function loadHandles(load: ResolvedLoad, scene: Scene): Handle[] {
     path,
   });
   const field = (name: string): string => `loads.${load.id}.${name}`;
-  const moved = (scheme: Scheme, x: number): Scheme => moveLoad(scheme, load.id, x);
   if (load.kind !== 'strip') {
     const at = { x: load.x, y: lowest(drawn) };
-    return [handle('x', `Place of ${load.name}, from mid-span`, 'place', at, load.x, moved, field('x'))];
+    return [
+      handle(
+        'x',
+        `Place of ${load.name}, from mid-span`,
+        'place',
+        at,
+        load.x,
+        (scheme, x) => moveLoad(scheme, load.id, x),
+        field('x'),
+      ),
+    ];
   }
   const bar = highest(drawn);
-  const middle = (load.from + load.to) / 2;
+  const { from, to } = load;
+  const middle = tidy((from + to) / 2);
+  /** Both ends by the same, to the micrometre: a file keeps no dust of binary fractions. */
+  const shifted = (scheme: Scheme, x: number): Scheme =>
+    setLoad(scheme, load.id, { from: tidy(from + x - middle), to: tidy(to + x - middle) });
   const end = (name: 'from' | 'to', words: string): Handle =>
     handle(
       name,
@@ -161,7 +176,7 @@ function loadHandles(load: ResolvedLoad, scene: Scene): Handle[] {
     );
   return [
     end('from', 'Left'),
-    handle('middle', `Middle of ${load.name}, from mid-span`, 'place', { x: middle, y: bar }, middle, moved, null),
+    handle('middle', `Middle of ${load.name}, from mid-span`, 'place', { x: middle, y: bar }, middle, shifted, null),
     end('to', 'Right'),
   ];
 }

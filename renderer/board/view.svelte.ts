@@ -17,7 +17,7 @@ import { boardTheme } from './theme.ts';
 import { fitted, millimetresPerMetre, panned, resized, toMetres, toPixels, zoomed, type Viewport } from './viewport.ts';
 
 /** Room left round the drawing, px. */
-const MARGIN = 28;
+const MARGIN = 20;
 /** Zoom for a press of a key or button. */
 const ZOOM_STEP = 1.25;
 /** A drawing smaller than this share of what would fit is fitted anew. */

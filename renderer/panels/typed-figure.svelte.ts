@@ -13,7 +13,7 @@ export interface FigureSource {
   readonly forget: (() => void) | null;
 }
 
-export const shownFigure = (value: number | null, kind: QuantityKind): string =>
+const shownFigure = (value: number | null, kind: QuantityKind): string =>
   value === null ? '' : formatQuantity(value, kind, SHOWN, { figures: 'exact' });
 
 /** The reading of entries brings the mathematics with it: loaded when a field is first entered. */

@@ -18,6 +18,7 @@ import {
 import type { ShapeMeasure } from '../../core/job/edits.ts';
 import type { ResolvedLoad, ResolvedProfile, ResolvedScheme } from '../../core/job/defaults.ts';
 import type { Scheme } from '../../core/job/schema.ts';
+import type { Check } from '../../core/assess/assessment.ts';
 import type { QuantityKind } from '../../core/quantity/kinds.ts';
 
 export interface Measure {
@@ -187,6 +188,20 @@ export const ASKED_SAFETY: Measure = {
   set: setAskedSafety,
   forget: (scheme) => setAskedSafety(scheme, undefined),
 };
+
+/** What a check cannot do without. */
+const NEEDED: Readonly<Record<string, string>> = {
+  'ring.sliding': 'masonry.friction',
+  'ring.crushing': 'masonry.strength',
+};
+
+/** The measure whose value is not known and for want of which a check says nothing; null where that is not why. */
+export function missingFor({ id, status }: Check, scheme: ResolvedScheme): Measure | null {
+  const path = NEEDED[id];
+  if (status !== 'unknown' || path === undefined) return null;
+  const measure = measureAt(scheme, path);
+  return measure?.read(scheme) === null ? measure : null;
+}
 
 /** The measure that a figure on the board states; null where the figure is computed. */
 export function measureAt(scheme: ResolvedScheme, path: string): Measure | null {

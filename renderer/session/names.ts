@@ -1,7 +1,7 @@
 import type { Job } from '../../core/job/schema.ts';
 
 /** A title as a file name that every system takes: plain letters, digits and hyphens; `arch` where none are left. */
-export function fileNameOf(title: string): string {
+function fileNameOf(title: string): string {
   const plain = title
     .normalize('NFKD')
     .replace(/\p{Mn}/gu, '')
