@@ -1,2 +1,3 @@
 /** `npm run bench`: every bench, one after the other, so that none disturbs another. */
-await import('./statics.ts');
+import './statics.ts';
+import './frames.ts';

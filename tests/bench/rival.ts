@@ -3,7 +3,7 @@
  * only its bounds changed; and built anew from typed arrays, as a drag must, which moves every joint.
  */
 import loadHighs, { type ModelData } from 'highs';
-import { blockProgramme, type PrintedModel } from '../validation/equilibrium-programme.ts';
+import { EquilibriumProgramme, type PrintedModel } from '../validation/equilibrium-programme.ts';
 import type { Rows } from '../../core/statics/hinge-simplex.ts';
 
 const highs = await loadHighs();
@@ -34,10 +34,15 @@ export function persistentRival(rows: Rows): PersistentRival {
 
 export const rivalBuiltAnew = (rows: Rows): Range => solvedAnew(modelOf(rows), [0], [1]);
 
-/** The same two questions of the whole block programme: its costs are those of the first joint's three forces. */
+/** The same two questions of the whole block programme. */
 export function blockRivalBuiltAnew(model: PrintedModel): Range {
-  const data = blockProgramme(model);
-  return solvedAnew(data, [0, 1, 2], Array.from(data.colCost).slice(0, 3));
+  const programme = new EquilibriumProgramme(model);
+  const { horizontal } = programme;
+  return solvedAnew(
+    programme.data(),
+    horizontal.map(([column]) => column),
+    horizontal.map(([, cost]) => cost),
+  );
 }
 
 function solvedAnew(data: ModelData, columns: readonly number[], costs: readonly number[]): Range {
