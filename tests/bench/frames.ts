@@ -1,13 +1,14 @@
 /**
  * Frame times while the crown is dragged for three seconds, in a real Chromium over the built page: the time between
- * frames as the page itself sees it, the 95th percentile and the worst. `npm run build` first, or `npm start` once.
+ * frames as the page itself sees it, the 95th percentile and the worst.
  */
 import { chromium, type Page } from '@playwright/test';
-import { fileURLToPath } from 'node:url';
+import { join } from 'node:path';
+import { buildAll, buildIsStale, PROJECT_FOLDER } from '../../app/build.ts';
 import { servePage } from '../../app/web/server.ts';
-import { CHROMIUM, CHROMIUM_FLAGS } from '../run/chromium.ts';
+import { CHROMIUM, CHROMIUM_FLAGS, chromiumIsHere } from '../run/chromium.ts';
 
-export interface FrameTimes {
+interface FrameTimes {
   readonly frames: number;
   /** ms */
   readonly median: number;
@@ -18,8 +19,8 @@ export interface FrameTimes {
 const SECONDS = 3;
 
 /** Drags the crown up and down for three seconds. @param voussoirs of the arch that is dragged; its own where null */
-export async function dragFrames(voussoirs: number | null = null): Promise<FrameTimes> {
-  const serving = await servePage(fileURLToPath(new URL('../../dist/renderer', import.meta.url)), 0);
+async function dragFrames(voussoirs: number | null = null): Promise<FrameTimes> {
+  const serving = await servePage(join(PROJECT_FOLDER, 'dist', 'renderer'), 0);
   const browser = await chromium.launch({ executablePath: CHROMIUM, args: CHROMIUM_FLAGS });
   try {
     const page = await browser.newPage({ viewport: { width: 1280, height: 800 } });
@@ -86,12 +87,16 @@ function percentile(values: readonly number[], share: number): number {
   return sorted[Math.min(sorted.length - 1, Math.floor(share * sorted.length))] ?? Number.NaN;
 }
 
-export function framesInWords(name: string, times: FrameTimes): string {
+function framesInWords(name: string, times: FrameTimes): string {
   const ms = (value: number): string => `${value.toFixed(1)} ms`;
   return `${name}: ${times.frames} frames in ${SECONDS} s, median ${ms(times.median)}, 95 in 100 within ${ms(times.percentile95)}, worst ${ms(times.worst)}`;
 }
 
-if (process.argv[1] === fileURLToPath(import.meta.url)) {
-  console.log(framesInWords('Crown dragged, sample arch', await dragFrames()));
-  console.log(framesInWords('Crown dragged, 200 voussoirs', await dragFrames(200)));
+if (chromiumIsHere()) {
+  if (buildIsStale(PROJECT_FOLDER)) await buildAll('warn');
+  console.log('\nFrames of a drag, 60 a second at best (16.7 ms)');
+  console.log(framesInWords('Crown, sample arch', await dragFrames()));
+  console.log(framesInWords('Crown, 200 voussoirs', await dragFrames(200)));
+} else {
+  console.log('\nFrames of a drag: not measured, there is no Chromium here.');
 }
