@@ -1,5 +1,5 @@
 import type { Edge, OffsettableCurve, Curve, ThicknessLaw } from './curve.ts';
-import { arcMoments, type Moments } from './moments.ts';
+import { angleOf, arcMoments, type Angle, type Moments } from './moments.ts';
 import type { Point } from './point.ts';
 import { SmoothCurve } from './smooth-curve.ts';
 
@@ -12,6 +12,7 @@ export class Arc implements OffsettableCurve {
     readonly to: number,
   ) {}
 
+  private lastAngle: Angle | null = null;
   readonly hollowRadius = Infinity;
   readonly skyward = { from: Math.PI, to: 0 };
 
@@ -32,7 +33,7 @@ export class Arc implements OffsettableCurve {
   }
 
   moments(u0: number, u1: number, origin: Point): Moments {
-    return arcMoments(this.centre, this.radius, u0, u1, origin);
+    return arcMoments(this.centre, this.radius, this.angle(u0), this.angle(u1), origin);
   }
 
   length(u0: number, u1: number): number {
@@ -64,6 +65,12 @@ export class Arc implements OffsettableCurve {
 
   sheared(slope: number): OffsettableCurve {
     return slope === 0 ? this : this.smooth().sheared(slope);
+  }
+
+  /** A ring asks block after block: the angle at which one ends begins the next. */
+  private angle(u: number): Angle {
+    if (this.lastAngle?.angle !== u) this.lastAngle = angleOf(u);
+    return this.lastAngle;
   }
 
   private smooth(): SmoothCurve {

@@ -30,15 +30,22 @@ export function lineMoments(a: Point, b: Point, origin: Point): Moments {
   };
 }
 
-/** The stretch of boundary along a circle about `centre` from angle `from` to angle `to` (rad, anticlockwise positive). */
-export function arcMoments(centre: Point, radius: number, from: number, to: number, origin: Point): Moments {
+/** An angle (rad, anticlockwise positive) with its sine and cosine, which neighbouring stretches share. */
+export interface Angle {
+  readonly angle: number;
+  readonly sin: number;
+  readonly cos: number;
+}
+
+export const angleOf = (angle: number): Angle => ({ angle, sin: Math.sin(angle), cos: Math.cos(angle) });
+
+/** The stretch of boundary along a circle about `centre` from one angle to another. */
+export function arcMoments(centre: Point, radius: number, from: Angle, to: Angle, origin: Point): Moments {
   const cx = centre.x - origin.x;
   const cy = centre.y - origin.y;
-  const sin0 = Math.sin(from);
-  const cos0 = Math.cos(from);
-  const sin1 = Math.sin(to);
-  const cos1 = Math.cos(to);
-  const turn = to - from;
+  const { sin: sin0, cos: cos0 } = from;
+  const { sin: sin1, cos: cos1 } = to;
+  const turn = to.angle - from.angle;
   const dSin = sin1 - sin0;
   const dCos = cos1 - cos0;
   // ∫cos² , ∫sin² , ∫cos³ , ∫sin³ over the arc

@@ -230,6 +230,15 @@ function faceMoments(
   right: Station,
   origin: Point,
 ): Moments {
+  const soffit = face === 'intrados';
+  const first = soffit ? left.piece : left.topPiece;
+  if (first === (soffit ? right.piece : right.topPiece)) {
+    // nearly every block lies on one curve
+    const piece = pieceAt(pieces, first);
+    return soffit
+      ? piece.intrados.moments(left.u, right.u, origin)
+      : piece.extrados.moments(left.topU, right.topU, origin);
+  }
   let sum: Moments = { area: 0, sx: 0, sy: 0 };
   eachStretch(pieces, face, left, right, (curve, u0, u1) => {
     const { area, sx, sy } = curve.moments(u0, u1, origin);
@@ -238,8 +247,16 @@ function faceMoments(
   return sum;
 }
 
+const facesSky = (u: number, { from, to }: Curve['skyward']): boolean => (u - from) * (u - to) <= 0;
+
 function skyFaceOf(pieces: readonly Piece[], left: Station, right: Station, { back }: RingBlock): SkyFace | null {
   const origin = left.intrados;
+  if (left.topPiece === right.topPiece) {
+    const { skyward } = pieceAt(pieces, left.topPiece).extrados;
+    if (facesSky(left.topU, skyward) && facesSky(right.topU, skyward)) {
+      return { from: left.extrados, to: right.extrados, moments: back, origin };
+    }
+  }
   const stretches: { curve: Curve; a: number; b: number; whole: boolean }[] = [];
   eachStretch(pieces, 'extrados', left, right, (curve, u0, u1) => {
     const { from, to } = curve.skyward;

@@ -75,14 +75,7 @@ function search(
   start?: readonly Multiplier[],
 ): { answer: SimplexOutcome; touchesBox: boolean } {
   const d = rows.unknowns;
-  // basis rows: 0 … count − 1 are real ones, −1 − i is the side of the box that bounds unknown i
-  const basis = new Int32Array(d);
-  const matrix = new Float64Array(d * d);
-  const right = new Float64Array(d);
-  const inverse = new Float64Array(d * d);
-  const s = new Float64Array(d);
-  const y = new Float64Array(d);
-  const w = new Float64Array(d);
+  const { basis, matrix, right, inverse, s, y, w } = deskFor(d);
   for (let i = 0; i < d; i++) {
     basis[i] = -1 - i;
     matrix[i * d + i] = (c[i] as number) < 0 ? -1 : 1;
@@ -118,6 +111,40 @@ function search(
     right[leaving] = rows.b[entering] as number;
   }
   throw new UndecidedError('the hinge search did not settle');
+}
+
+/** Where one search writes: kept from one to the next, since a drag makes some fifty of them a frame. */
+interface Desk {
+  /** 0 … count − 1 are rows, −1 − i is the side of the box that bounds unknown i. */
+  readonly basis: Int32Array;
+  readonly matrix: Float64Array;
+  readonly right: Float64Array;
+  readonly inverse: Float64Array;
+  readonly s: Float64Array;
+  readonly y: Float64Array;
+  readonly w: Float64Array;
+}
+
+const DESKS = new Map<number, Desk>();
+
+function deskFor(d: number): Desk {
+  let desk = DESKS.get(d);
+  if (desk === undefined) {
+    const vector = (): Float64Array => new Float64Array(d);
+    const square = (): Float64Array => new Float64Array(d * d);
+    desk = {
+      basis: new Int32Array(d),
+      matrix: square(),
+      right: vector(),
+      inverse: square(),
+      s: vector(),
+      y: vector(),
+      w: vector(),
+    };
+    DESKS.set(d, desk);
+  }
+  desk.matrix.fill(0);
+  return desk;
 }
 
 /** A starting basis whose multipliers fall below this share of the largest is not trusted. */
@@ -226,7 +253,7 @@ function settled(
     if (row >= 0) multipliers.push({ row, y: Math.max(0, y[i] as number) });
   });
   const value = s.reduce((sum, si, i) => sum + si * (c[i] as number), 0);
-  return { answer: { kind: 'optimal', s, value, basis: multipliers }, touchesBox: false };
+  return { answer: { kind: 'optimal', s: s.slice(), value, basis: multipliers }, touchesBox: false };
 }
 
 function noneLeaves(

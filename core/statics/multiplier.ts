@@ -1,6 +1,6 @@
 /** How far a named set of forces can be multiplied before the ring becomes a mechanism: one more unknown, its factor. */
 import { minimise, type Rows } from './hinge-simplex.ts';
-import { hingesOf, lineRows } from './rows.ts';
+import { hingesOf, lineRowsWith } from './rows.ts';
 import type { RingSystem, Sums } from './system.ts';
 import type { TurningHinge } from './thrust.ts';
 
@@ -17,7 +17,7 @@ export type GreatestMultiplier =
  * @param rest the ring with all other forces; @param set sums of the forces of the set, in the same frame.
  */
 export function greatestMultiplier(rest: RingSystem, set: Sums): GreatestMultiplier {
-  const outcome = minimise(withFactorNotNegative(lineRows(rest, [set])), [0, 0, 0, -1]);
+  const outcome = minimise(withFactorNotNegative(lineRowsWith(rest, [set])), [0, 0, 0, -1]);
   const onRing = 2 * rest.joints;
   switch (outcome.kind) {
     case 'unbounded':

@@ -29,8 +29,8 @@ export interface LeastRatio {
 
 /** Trials after which the ratio must have settled; Newton needs about five. */
 const TRIALS = 60;
-/** Relative change of the ratio that counts as settled: a few roundings. */
-const SETTLED = 1e-14;
+/** Slack of the last programme that counts as none: what Newton leaves is of the order of its square, a rounding. */
+const SETTLED = 1e-9;
 /** A ratio below this is nothing but rounding on figures of order one: the state runs where p is zero at every joint. */
 const NOTHING = 1e-12;
 /** Ratios beyond this are no statement about a ring any more. */
@@ -65,7 +65,7 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
       if (ratio > LARGEST_RATIO) return null;
       continue;
     }
-    const settled = best !== null && attained >= best.ratio * (1 - SETTLED);
+    const settled = best !== null && outcome.value > -SETTLED;
     if (best === null || attained < best.ratio) {
       best = { ratio: attained, state: outcome.s.slice(0, 3), direction: null, basis: outcome.basis };
     }
@@ -117,11 +117,16 @@ function ratioAtEndlessThrust(p: JointForms, q: JointForms, weights: Float64Arra
 
 /** The forms' values for a state, kept away from zero by a sliver of their mean so that no joint is left without slack. */
 function valuesOf(forms: JointForms, s: State): Float64Array {
-  const values = forms.b.map((_, j) => valueAt(forms, s, j));
-  const mean = values.reduce((sum, value) => sum + value, 0) / values.length;
-  return values.map((value) => Math.max(value, 1e-6 * mean));
+  const joints = forms.b.length;
+  const values = new Float64Array(joints);
+  let sum = 0;
+  for (let j = 0; j < joints; j++) sum += values[j] = valueAt(forms, s, j);
+  const least = (1e-6 * sum) / joints;
+  for (let j = 0; j < joints; j++) if ((values[j] as number) < least) values[j] = least;
+  return values;
 }
 
+/** The form's value at joint j. */
 export const valueAt = ({ a, b }: JointForms, s: State, j: number): number =>
   (a[3 * j] as number) * (s[0] as number) +
   (a[3 * j + 1] as number) * (s[1] as number) +

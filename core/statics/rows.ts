@@ -1,40 +1,34 @@
 /** The rows of a ring that takes no tension: at every joint the resultant passes between intrados and extrados. */
 import type { Hinge } from './hinge.ts';
 import type { Multiplier, Rows } from './hinge-simplex.ts';
-import { momentAbout, type RingSystem, type Sums } from './system.ts';
+import { momentAbout, oncePerSystem, type RingSystem, type Sums } from './system.ts';
 
-/**
- * Two rows a joint: 2j, moment about the extrados ≥ 0, and 2j + 1, moment about the intrados ≤ 0. Each multiplier (a
- * load factor, a sway coefficient) adds an unknown whose column are the sums it multiplies.
- */
-export function lineRows(system: RingSystem, columns: readonly Sums[] = []): Rows {
+/** Two rows a joint: 2j, moment about the extrados ≥ 0, and 2j + 1, moment about the intrados ≤ 0. */
+export const lineRows = oncePerSystem((system) => momentRows(system, []));
+
+/** The same with multipliers: each (a load factor, a sway coefficient) adds an unknown whose column are its sums. */
+export const lineRowsWith = (system: RingSystem, columns: readonly Sums[]): Rows => momentRows(system, columns);
+
+function momentRows(system: RingSystem, columns: readonly Sums[]): Rows {
   const d = 3 + columns.length;
   const count = 2 * system.joints;
   const a = new Float64Array(count * d);
   const b = new Float64Array(count);
   const { ix, iy, ex, ey, sums } = system;
   for (let j = 0; j < system.joints; j++) {
-    setMomentRow(a, b, 2 * j, 1, ex[j] as number, ey[j] as number);
-    setMomentRow(a, b, 2 * j + 1, -1, ix[j] as number, iy[j] as number);
+    for (let side = 0; side < 2; side++) {
+      const sign = side === 0 ? 1 : -1;
+      const px = (side === 0 ? ex[j] : ix[j]) as number;
+      const py = (side === 0 ? ey[j] : iy[j]) as number;
+      const at = (2 * j + side) * d;
+      a[at] = sign * py;
+      a[at + 1] = -sign * px;
+      a[at + 2] = sign;
+      for (let k = 0; k < columns.length; k++) a[at + 3 + k] = sign * momentAbout(columns[k] as Sums, j, px, py);
+      b[2 * j + side] = -sign * momentAbout(sums, j, px, py);
+    }
   }
   return { unknowns: d, count, a, b };
-
-  function setMomentRow(
-    to: Float64Array,
-    limit: Float64Array,
-    row: number,
-    sign: number,
-    px: number,
-    py: number,
-  ): void {
-    const j = row >> 1;
-    const at = row * d;
-    to[at] = sign * py;
-    to[at + 1] = -sign * px;
-    to[at + 2] = sign;
-    for (let k = 0; k < columns.length; k++) to[at + 3 + k] = sign * momentAbout(columns[k] as Sums, j, px, py);
-    limit[row] = -sign * momentAbout(sums, j, px, py);
-  }
 }
 
 export const hingeOfRow = (row: number): Hinge => ({ joint: row >> 1, side: row % 2 === 0 ? 'extrados' : 'intrados' });

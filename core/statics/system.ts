@@ -104,3 +104,15 @@ export function sumsOf(frame: Frame, blocks: readonly Block[], pick: (block: Blo
 /** Moment about P of the sums left of joint j. */
 export const momentAbout = (sums: Sums, j: number, px: number, py: number): number =>
   (sums.m[j] as number) - px * (sums.fy[j] as number) + py * (sums.fx[j] as number);
+
+/** Makes something of a system the first time it is asked for, and hands out the same from then on. */
+export function oncePerSystem<T extends object>(make: (system: RingSystem) => T): (system: RingSystem) => T {
+  const made = new WeakMap<RingSystem, T>();
+  return (system) => {
+    const held = made.get(system);
+    if (held !== undefined) return held;
+    const fresh = make(system);
+    made.set(system, fresh);
+    return fresh;
+  };
+}

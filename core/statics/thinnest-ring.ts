@@ -9,8 +9,8 @@ import { halfMomentForms, jointLengths, momentForms } from './joint-forms.ts';
 import { leastSlack, valueAt } from './ratio.ts';
 import type { RingSystem } from './system.ts';
 
-/** Relative change of the thickness that counts as settled: finer than any figure printed. */
-const CLOSE = 1e-9;
+/** Relative step of the secant that counts as the last: what it leaves is of the order of its square, under 1e-9. */
+const CLOSE = 1e-5;
 const MOST_TRIALS = 80;
 /** Thicknesses under this share of the present one are no ring any more: the shape stands however thin it is made. */
 const NO_RING = 1e-3;
@@ -42,7 +42,9 @@ export function thinnestRing(
   let fails = { t: 0, slack: Infinity };
   let stands = { t: Infinity, slack: -Infinity };
   let t = Math.min(first, thickest);
-  let before: { t: number; slack: number } | null = null;
+  // at the present thickness the slack is the share less one, by the weights chosen
+  let before: { t: number; slack: number } | null =
+    present.middle === null ? null : { t: present.thickness, slack: present.middle.share - 1 };
   for (let trial = 0; trial < MOST_TRIALS; trial++) {
     const here = { t, slack: slackAt(t) };
     if (here.slack > 0) fails = here;
