@@ -142,11 +142,11 @@ function thinnest({ resolved, ring, system }: BuiltScheme, middle: MiddleShare |
   const { thickness } = resolved.ring;
   const joints = ring.joints;
   const width = Math.abs((joints[joints.length - 1]?.intrados.x ?? 0) - (joints[0]?.intrados.x ?? 0));
-  const systemFor = (trial: number) => buildScheme(withThickness(resolved, trial)).system;
+  const systemFor = (trial: number) => buildScheme(withThickness(resolved, trial), 'rests-beside').system;
   try {
     return thinnestRing(systemFor, { thickness, system, middle }, Math.max(thickness, THICKEST_OF_SPAN * width));
   } catch (error) {
-    // a trial ring too thick for its curvature, or so thin that a load stands beside it, ends the search without an answer
+    // a trial ring too thick for its curvature, or thinner than its lost mortar, ends the search without an answer
     if (error instanceof ProblemError) return null;
     throw error;
   }

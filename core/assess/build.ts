@@ -16,13 +16,16 @@ export interface BuiltScheme {
 }
 
 /** @throws ProblemError with paths from the scheme's root. */
-export function buildScheme(resolved: ResolvedScheme): BuiltScheme {
+export function buildScheme(
+  resolved: ResolvedScheme,
+  offTheRing: Parameters<typeof loadRing>[2] = 'refused',
+): BuiltScheme {
   const ring = buildRing(ringForm(resolved));
   const joints = bearingJoints(ring.joints, {
     lostMortar: resolved.ring.lostMortar,
     backingLevel: resolved.backing?.counts === 'masonry' ? resolved.backing.level : null,
   });
-  const blocks = loadRing(ring, resolved);
+  const blocks = loadRing(ring, resolved, offTheRing);
   return { resolved, ring, joints, blocks, system: ringSystem(joints, blocks) };
 }
 

@@ -16,9 +16,15 @@ export function topLevel(ring: RingGeometry, scheme: Pick<ResolvedScheme, 'above
 /**
  * Weights, what lies above, loads and sway on each block of the ring. Sway pushes every weight of masonry and fill
  * sideways at its own place; named loads are taken as not fixed to the arch and are not swayed.
+ * @param offTheRing what to make of loads that stand beside the ring: a slip to refuse, or, for a trial ring thinner
+ * than the one surveyed, a load that rests on what holds the arch.
  * @throws ProblemError when a load does not stand on the arch; paths from the scheme's root.
  */
-export function loadRing(ring: RingGeometry, scheme: ResolvedScheme): Block[] {
+export function loadRing(
+  ring: RingGeometry,
+  scheme: ResolvedScheme,
+  offTheRing: 'refused' | 'rests-beside' = 'refused',
+): Block[] {
   const forces: BlockForces = ring.blocks.map(() => []);
   const { above, backing, breadth, masonry, loads, sway } = scheme;
   addSelfWeight(forces, ring, masonry.unitWeight, breadth);
@@ -29,7 +35,8 @@ export function loadRing(ring: RingGeometry, scheme: ResolvedScheme): Block[] {
     if (backing !== null) addBacking(forces, ring, backing, above.unitWeight, breadth);
     const ground = { sky, breadth, surface: topLevel(ring, scheme) + layersHeight(above.layers) };
     loads.forEach((load, i) => {
-      problems.push(...underPath(`loads[${i}]`, addLoad(forces, ground, load)));
+      const slips = addLoad(forces, ground, load);
+      if (offTheRing === 'refused') problems.push(...underPath(`loads[${i}]`, slips));
     });
     if (problems.length > 0) throw new ProblemError(problems);
   }
