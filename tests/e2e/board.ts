@@ -8,7 +8,7 @@ export async function openApp(page: Page): Promise<void> {
       Reflect.deleteProperty(window, name);
   });
   await page.goto('/');
-  await expect(headline(page)).toBeVisible();
+  await expect(handle(page, /^Rise/)).toBeVisible();
 }
 
 export const headline = (page: Page): Locator => page.getByTestId('headline');
