@@ -1,5 +1,5 @@
 import { join, resolve } from 'node:path';
-import { assessJob } from '../../core/assess/assess.ts';
+import { assessJobFully } from '../../core/assess/assess-fully.ts';
 import type { Assessment } from '../../core/assess/assessment.ts';
 import type { FormatId } from '../../core/export/formats.ts';
 import { readJobFile } from '../../core/job/archive.ts';
@@ -76,7 +76,7 @@ async function assessFile(file: string, { folder, input }: Terminal): Promise<As
   try {
     const opened = readJobFile(read.value);
     if (!opened.ok) return { ok: false, problems: opened.problems.map(problemSentence) };
-    const result = assessJob(opened.job);
+    const result = assessJobFully(opened.job);
     if (!result.ok) return { ok: false, problems: result.problems.map(problemSentence) };
     return { ok: true, job: opened.job, assessment: result.assessment };
   } catch (error) {

@@ -27,10 +27,41 @@ function schemeLines(scheme: SchemeAssessment): string[] {
     ...(geometricSafety === null
       ? []
       : [row('safety', `${figure(geometricSafety)}, ring over the least that would do`)]),
+    ...furtherFacts(scheme).map(([head, text]) => row(head, text)),
     ...checks.map((check) => row(check.status, checkText(check))),
     ...assumed.map(({ field, value, because }) => row('assumed', `${field} ${value ?? 'not known'}: ${because}`)),
   ];
   return [name, ...facts.map((fact) => INDENT + fact)];
+}
+
+/** What was asked beyond the first look, each only where there is something to say. */
+function furtherFacts({
+  thinnestRing,
+  swayCapacity,
+  spread,
+  loadFactors,
+  axles,
+  combinations,
+  cracks,
+}: SchemeAssessment) {
+  const facts: [head: string, text: string][] = [];
+  if (typeof thinnestRing === 'number')
+    facts.push(['thinnest', `${figure(thinnestRing)} m, the thinnest ring that stands`]);
+  if (typeof swayCapacity === 'number') facts.push(['sideways', `${figure(swayCapacity)} g, the smaller of both ways`]);
+  if (typeof spread?.collapse === 'number') facts.push(['spread', `${figure(spread.collapse)} m until it falls`]);
+  for (const { load, factor } of loadFactors ?? []) {
+    if (factor !== null) facts.push(['factor', `${load}: ${figure(factor)}`]);
+  }
+  for (const { load, worst } of axles ?? []) {
+    if (worst !== null)
+      facts.push(['axle', `${load}: least factor ${figure(worst.factor)} at x = ${figure(worst.x)} m`]);
+  }
+  for (const { name, stands, geometricSafety } of combinations ?? []) {
+    const safety = geometricSafety === null ? '' : `, geometric safety ${figure(geometricSafety)}`;
+    facts.push(['together', `${name}: ${stands ? 'stands' : 'does not stand'}${safety}`]);
+  }
+  if (cracks !== undefined) facts.push(['cracks', cracks.because]);
+  return facts;
 }
 
 function checkText({ title, where, because }: Check): string {

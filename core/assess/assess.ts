@@ -44,13 +44,16 @@ export type JobOutcome =
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
 /** Assesses every scheme of a job; problems carry paths from the job's root. */
-export function assessJob(job: Job): JobOutcome {
+export const assessJob = (job: Job): JobOutcome => assessSchemes(job, ({ result }) => result);
+
+/** The same, with `finish` making each scheme's part of the document. */
+export function assessSchemes(job: Job, finish: (assessed: AssessedScheme) => SchemeAssessment): JobOutcome {
   const schemes: SchemeAssessment[] = [];
   const problems: Problem[] = [];
   job.arches.forEach((arch, a) => {
     arch.schemes.forEach((scheme, i) => {
       const outcome = assessScheme(arch, scheme);
-      if (outcome.ok) schemes.push(outcome.assessed.result);
+      if (outcome.ok) schemes.push(finish(outcome.assessed));
       else problems.push(...underPath(`arches[${a}].schemes[${i}]`, outcome.problems));
     });
   });

@@ -7,10 +7,14 @@
  * and a check says why. Fields marked optional belong to questions that were not asked of this scheme.
  */
 import type { Check, Status } from '../checks/check.ts';
+import type { CrackReading } from '../checks/crack-reading.ts';
+import type { ProportionRule } from '../checks/proportion-rules.ts';
+import type { RoadAxle } from '../checks/road-axle.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/ring.ts';
 import type { Assumed } from '../job/assumed.ts';
 import type { Block, BlockForce } from '../loading/forces.ts';
+import type { CrackPattern } from '../statics/crack-pattern.ts';
 import type { CrownBalance } from '../statics/crown-balance.ts';
 import type { Hinge, Side } from '../statics/hinge.ts';
 import type { TurningHinge } from '../statics/thrust.ts';
@@ -72,6 +76,36 @@ export interface Proof {
   readonly gap: number | null;
 }
 
+/** The ring under one combination of factored loads. Forces in kN. */
+export interface CombinationAnswer {
+  readonly combination: string;
+  readonly name: string;
+  readonly stands: boolean;
+  readonly least: number | null;
+  readonly greatest: number | null;
+  readonly geometricSafety: number | null;
+  /** How far the variable loads, factored, can grow together; null without a finite limit or where nothing stands. */
+  readonly variableFactor: number | null;
+  readonly hinges: readonly Hinge[];
+}
+
+/** How far the springings can still part before the ring falls. */
+export interface SpreadAnswer {
+  /** m; null when it still stands at the furthest spread tried. */
+  readonly collapse: number | null;
+  readonly furthest: number;
+  /** Thrust against spread, from the present place to the last that stands, kN and m. */
+  readonly curve: readonly { readonly spread: number; readonly horizontal: number }[];
+}
+
+/** The least factor of an axle load as it crosses. */
+export interface AxleAnswer {
+  readonly load: string;
+  /** Null where no place has a limit. */
+  readonly worst: { readonly x: number; readonly factor: number; readonly hinges: readonly Hinge[] } | null;
+  readonly places: number;
+}
+
 export interface SchemeAssessment {
   readonly arch: string;
   readonly scheme: string;
@@ -90,6 +124,16 @@ export interface SchemeAssessment {
   readonly mechanism?: Mechanism | null;
   readonly checks: readonly Check[];
   readonly proof: Proof;
+  readonly combinations?: readonly CombinationAnswer[];
+  /** How the ring opens under each common movement; `opens` compares the openings of one movement with each other. */
+  readonly movements?: readonly CrackPattern[];
+  /** Only where cracks are marked. */
+  readonly cracks?: CrackReading;
+  readonly spread?: SpreadAnswer | null;
+  readonly axles?: readonly AxleAnswer[];
+  /** Comparisons, never checks. */
+  readonly proportions?: readonly ProportionRule[];
+  readonly road?: RoadAxle | null;
 }
 
 export interface Assessment {

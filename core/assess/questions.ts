@@ -1,22 +1,13 @@
 /**
- * Questions asked of an assessed scheme one by one: a chosen thrust, a line drawn by hand, a movement of a support, the
- * marks of cracks. Pure and synchronous; what takes longer than a frame is in `long-questions.ts`.
+ * Questions asked of an assessed scheme one by one: a chosen thrust, a line drawn by hand, a movement of a support.
+ * Pure and synchronous; what takes longer than a frame is in `long-questions.ts`.
  */
-import { readCracks, type CrackMark, type CrackReading } from '../checks/crack-reading.ts';
 import { distance, type Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
-import type { Crack } from '../job/schema.ts';
-import type { BlockForces } from '../loading/forces.ts';
-import { addLoad } from '../loading/loads.ts';
-import { swayForces, topLevel } from '../loading/load-ring.ts';
-import { skyOver } from '../loading/sky.ts';
-import { crackPatterns } from '../statics/crack-pattern.ts';
 import { crossing, jointForce, lineOfThrust, type State } from '../statics/line.ts';
 import type { Side } from '../statics/hinge.ts';
 import { stateBetween, stateThrough, type Passage } from '../statics/states.ts';
 import { stressBlock, type StressBlock } from '../statics/stress-block.ts';
 import { answerToMovement, type MovementAnswer, type SupportMovement } from '../statics/support-movement.ts';
-import { sumsOf } from '../statics/system.ts';
 import { thrustRange } from '../statics/thrust.ts';
 import type { BuiltScheme } from './build.ts';
 
@@ -106,32 +97,3 @@ const ON_FACE = 1e-9;
 /** Where the ring opens, and how far, when a support moves. */
 export const movement = ({ system, joints }: BuiltScheme, moved: SupportMovement): MovementAnswer =>
   answerToMovement(system, joints, moved);
-
-/** Places along the span at which an overload is tried against the marks. */
-const OVERLOAD_PLACES = 13;
-
-/** The movements that could have made the cracks marked in the scheme, ranked. */
-export function crackReading(built: BuiltScheme): CrackReading {
-  const { system, joints, blocks, resolved, ring } = built;
-  const sway = sumsOf(system.frame, blocks, ({ forces }) => swayForces(forces, 1));
-  const sky = skyOver(ring);
-  const ground = { sky, breadth: resolved.breadth, surface: topLevel(ring, resolved) };
-  const overloads = Array.from({ length: OVERLOAD_PLACES }, (_, i) => {
-    const x = sky.left.x + ((sky.right.x - sky.left.x) * (i + 1)) / (OVERLOAD_PLACES + 1);
-    const forces: BlockForces = blocks.map(() => []);
-    addLoad(forces, ground, { id: 'overload', name: 'overload', action: 'variable', kind: 'point', x, force: 1 });
-    const loaded = forces.map((block) => ({ forces: block }));
-    return { x, sums: sumsOf(system.frame, loaded, (block) => block.forces) };
-  });
-  const patterns = crackPatterns(system, joints, sway, overloads);
-  return readCracks(marksOf(resolved.cracks, joints), patterns, joints.length);
-}
-
-/** Crack marks on joint numbers: a mark placed along the intrados goes to the nearest joint. */
-export function marksOf(cracks: readonly Crack[], joints: readonly Joint[]): CrackMark[] {
-  return cracks.flatMap(({ joint, along, face, width }): CrackMark[] => {
-    const number = joint ?? (along === undefined ? undefined : Math.round(along * (joints.length - 1)));
-    if (number === undefined || number >= joints.length) return [];
-    return [{ joint: number, face, width: width ?? null }];
-  });
-}

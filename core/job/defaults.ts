@@ -5,7 +5,7 @@
  * `Assumed`; what is merely absent (no loads, no sway, level springings, no name) is filled without a word.
  */
 import type { Assumed } from './assumed.ts';
-import type { Above, Backing, Combination, Crack, Load, Masonry, Profile, Ring, Scheme, Support } from './schema.ts';
+import type { Above, Backing, Combination, Crack, Load, Masonry, Profile, Ring, Road, Scheme, Support } from './schema.ts';
 
 /** Every field given; `null` only where the value is not known and nothing sensible stands in for it. */
 type Filled<T> = T extends unknown ? { readonly [Key in keyof T]-?: Exclude<T[Key], undefined> } : never;
@@ -37,6 +37,8 @@ export interface ResolvedScheme {
   readonly loads: readonly ResolvedLoad[];
   readonly sway: number;
   readonly combinations: readonly ResolvedCombination[];
+  /** Null where no road goes over the arch. */
+  readonly road: Road | null;
   readonly cracks: readonly Crack[];
   readonly supports: { readonly left: Support; readonly right: Support };
   readonly asked: { readonly geometricSafety: number };
@@ -74,6 +76,7 @@ export function resolveScheme(scheme: Scheme, index = 0): { resolved: ResolvedSc
     loads: (scheme.loads ?? []).map((load, i) => resolveLoad(load, `loads[${i}]`, assumed)),
     sway: scheme.sway ?? 0,
     combinations: (scheme.combinations ?? []).map(resolveCombination),
+    road: scheme.road ?? null,
     cracks: scheme.cracks ?? [],
     supports: resolveSupports(scheme.supports ?? {}, assumed),
     asked: { geometricSafety: scheme.asked?.geometricSafety ?? assumeSafety(assumed) },

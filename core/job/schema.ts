@@ -189,6 +189,17 @@ export const combinationSchema = v.looseObject({
   ),
 });
 
+const share = v.optional(v.pipe(v.number(), v.finite(), v.gtValue(0), v.maxValue(1)));
+
+/** A road over the arch: what the assessor judges for the standard axle load, each from 0 to 1. */
+export const roadSchema = v.looseObject({
+  /** Read from the standard for a span of more than four rises. */
+  spanRise: share,
+  material: share,
+  jointing: share,
+  condition: share,
+});
+
 /** An opening seen at a joint of the ring. Its place: the joint's number, or its share of the way along the intrados. */
 export const crackSchema = v.looseObject({
   id,
@@ -220,6 +231,7 @@ export const schemeSchema = v.looseObject({
   sway: v.optional(within(10)),
   supports: v.optional(v.looseObject({ left: v.optional(supportSchema), right: v.optional(supportSchema) })),
   combinations: v.optional(v.pipe(v.array(combinationSchema), v.maxLength(LIMITS.marks))),
+  road: v.optional(roadSchema),
   cracks: v.optional(v.pipe(v.array(crackSchema), v.maxLength(LIMITS.marks))),
   /** What the assessor asks for beyond standing; a ring that holds with less is called narrow. */
   asked: v.optional(v.looseObject({ geometricSafety: v.optional(v.pipe(finite, v.minValue(1), v.maxValue(100))) })),
@@ -265,6 +277,7 @@ export type Masonry = Deep<v.InferOutput<typeof masonrySchema>>;
 export type Above = Deep<v.InferOutput<typeof aboveSchema>>;
 export type Backing = Deep<v.InferOutput<typeof backingSchema>>;
 export type Combination = Deep<v.InferOutput<typeof combinationSchema>>;
+export type Road = Deep<v.InferOutput<typeof roadSchema>>;
 export type Crack = Deep<v.InferOutput<typeof crackSchema>>;
 export type Load = Deep<v.InferOutput<typeof loadSchema>>;
 export type Support = Deep<v.InferOutput<typeof supportSchema>>;
