@@ -12,12 +12,17 @@ import { drawnStyle, FACES, type DrawnStyle, type Theme } from '../../core/drawi
 import { emOf } from '../../core/drawing/text.ts';
 import { PIXELS_PER_MILLIMETRE, toPixels, type Viewport } from './viewport.ts';
 
+export interface MarkedJoint {
+  readonly number: number;
+  readonly joint: Joint;
+}
+
 export interface Picture {
   readonly scene: Scene | null;
   readonly viewport: Viewport;
   readonly theme: Theme;
   /** Joints pointed at by a finding. */
-  readonly marked: readonly Joint[];
+  readonly marked: readonly MarkedJoint[];
 }
 
 /** A pen thinner than this, px, would fade on the screen. */
@@ -69,29 +74,49 @@ export class Painter {
     }
   }
 
-  /** A broad line over each joint pointed at, past both its faces. */
+  /** A broad line over each joint pointed at, past both its faces, with its number at the back. */
   #paintMarks(context: Context): void {
     if (this.#picture === null) return;
     const { viewport, theme, marked } = this.#picture;
+    const ink = theme.ink ?? 'black';
+    const ground = theme.sheet ?? 'white';
     context.setLineDash([]);
-    context.lineWidth = 3;
     context.lineCap = 'round';
-    context.strokeStyle = theme.madder ?? theme.ink ?? '#000000';
-    for (const { intrados, extrados } of marked) {
-      const a = toPixels(viewport, intrados);
-      const b = toPixels(viewport, extrados);
+    context.lineJoin = 'round';
+    context.font = `bold ${MARK_LETTERS}px 'DejaVu Sans', sans-serif`;
+    context.textAlign = 'center';
+    context.textBaseline = 'middle';
+    for (const { number, joint } of marked) {
+      const a = toPixels(viewport, joint.intrados);
+      const b = toPixels(viewport, joint.extrados);
       const length = Math.hypot(b.x - a.x, b.y - a.y);
-      const [dx, dy] = [((b.x - a.x) / length) * PAST_FACE, ((b.y - a.y) / length) * PAST_FACE];
-      context.beginPath();
-      context.moveTo(a.x - dx, a.y - dy);
-      context.lineTo(b.x + dx, b.y + dy);
-      context.stroke();
+      const [dx, dy] = [(b.x - a.x) / length, (b.y - a.y) / length];
+      // A light line under the dark one parts it from whatever it crosses; so it is with the letters.
+      for (const [colour, width] of [
+        [ground, 7],
+        [ink, 3],
+      ] as const) {
+        context.strokeStyle = colour;
+        context.lineWidth = width;
+        context.beginPath();
+        context.moveTo(a.x - dx * PAST_FACE, a.y - dy * PAST_FACE);
+        context.lineTo(b.x + dx * PAST_FACE, b.y + dy * PAST_FACE);
+        context.stroke();
+      }
+      const words = `joint ${number}`;
+      const at = { x: b.x + dx * (PAST_FACE + 34), y: b.y + dy * (PAST_FACE + 16) };
+      context.strokeStyle = ground;
+      context.lineWidth = 5;
+      context.strokeText(words, at.x, at.y);
+      context.fillStyle = ink;
+      context.fillText(words, at.x, at.y);
     }
   }
 }
 
 /** px */
 const PAST_FACE = 9;
+const MARK_LETTERS = 14;
 
 const NOTHING: DrawnStyle = { stroke: null, fill: null, pen: 0, dash: [] };
 

@@ -1,5 +1,4 @@
 /** What the board shows of the session: the place on the screen, the drawing at that scale, and what can be taken hold of. */
-import type { Joint } from '../../core/assess/assessment.ts';
 import { elevation } from '../../core/drawing/elevation.ts';
 import type { About, Scene } from '../../core/drawing/scene.ts';
 import type { Theme } from '../../core/drawing/style.ts';
@@ -13,6 +12,7 @@ import { theme } from '../session/theme.svelte.ts';
 import type { Grip } from './gestures.ts';
 import { handlesOf, nearestHandle, rounded, type Handle } from './handles.ts';
 import { itemAt } from './hit.ts';
+import type { MarkedJoint } from './paint.ts';
 import { boardTheme } from './theme.ts';
 import { fitted, millimetresPerMetre, panned, resized, toMetres, toPixels, zoomed, type Viewport } from './viewport.ts';
 
@@ -60,10 +60,11 @@ export class BoardView {
   });
   readonly theme: Theme = $derived(boardTheme(theme.dark, theme.forced));
   /** Joints that the selection points at. */
-  readonly marked: readonly Joint[] = $derived.by(() => {
+  readonly marked: readonly MarkedJoint[] = $derived.by(() => {
     const { selection, assessed } = this.#session;
-    const joint = selection?.kind === 'joint' ? assessed?.ring.joints[selection.joint] : undefined;
-    return joint === undefined ? [] : [joint];
+    if (selection?.kind !== 'joint') return [];
+    const joint = assessed?.ring.joints[selection.joint];
+    return joint === undefined ? [] : [{ number: selection.joint, joint }];
   });
 
   resize(width: number, height: number): void {

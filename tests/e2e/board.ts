@@ -7,6 +7,8 @@ export async function openApp(page: Page): Promise<void> {
     for (const name of ['showOpenFilePicker', 'showSaveFilePicker', 'showDirectoryPicker'])
       Reflect.deleteProperty(window, name);
   });
+  // Asking for choosers from the start: one that is opened while the asking is still on its way is never told.
+  page.on('filechooser', () => undefined);
   await page.goto('/');
   await expect(handle(page, /^Rise/)).toBeVisible();
 }
