@@ -48,9 +48,7 @@ function axleAnswers(built: BuiltScheme): AxleAnswer[] {
       {
         load: load.id,
         worst:
-          worst === null || worst.factor === null
-            ? null
-            : { x: worst.x, factor: worst.factor, hinges: worst.hinges },
+          worst === null || worst.factor === null ? null : { x: worst.x, factor: worst.factor, hinges: worst.hinges },
         places: AXLE_PLACES,
       },
     ];

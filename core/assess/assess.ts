@@ -14,6 +14,7 @@ import type { Arch, Job, Scheme } from '../job/schema.ts';
 import { loadRing } from '../loading/load-ring.ts';
 import { crownBalance } from '../statics/crown-balance.ts';
 import { leastMiddleShare, type MiddleShare } from '../statics/geometric-safety.ts';
+import { UndecidedError } from '../statics/hinge-simplex.ts';
 import { lineOfThrust } from '../statics/line.ts';
 import { neededStrength } from '../statics/needed-strength.ts';
 import { neededFriction } from '../statics/sliding.ts';
@@ -69,9 +70,17 @@ export function assessScheme(arch: Arch, scheme: Scheme): SchemeOutcome {
     return { ok: true, assessed: { resolved, ring: built.ring, built, result: assess(arch, built, assumed) } };
   } catch (error) {
     if (error instanceof ProblemError) return { ok: false, problems: error.problems };
+    if (error instanceof UndecidedError) return { ok: false, problems: [undecided(error)] };
     throw error;
   }
 }
+
+const undecided = ({ message }: UndecidedError): Problem => ({
+  path: '',
+  value: '',
+  wrong: `no answer could be decided within the accuracy of the figures: ${message}`,
+  right: 'change a measure or a load a little, or the number of voussoirs, and report the file',
+});
 
 function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): SchemeAssessment {
   const { resolved, ring, joints, blocks, system } = built;

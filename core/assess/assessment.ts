@@ -11,7 +11,7 @@ import type { CrackReading } from '../checks/crack-reading.ts';
 import type { ProportionRule } from '../checks/proportion-rules.ts';
 import type { RoadAxle } from '../checks/road-axle.ts';
 import type { Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Assumed } from '../job/assumed.ts';
 import type { Block, BlockForce } from '../loading/forces.ts';
 import type { CrackPattern } from '../statics/crack-pattern.ts';

@@ -1,6 +1,7 @@
 /** From a scheme with its defaults filled to figures for the statics: ring, forces and system. */
 import { bearingJoints } from '../geometry/bearing.ts';
-import { buildRing, type Joint, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import { buildRing, type RingForm, type RingGeometry } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { ResolvedScheme } from '../job/defaults.ts';
 import type { Block } from '../loading/forces.ts';
 import { loadRing } from '../loading/load-ring.ts';
@@ -29,7 +30,7 @@ export function buildScheme(
   return { resolved, ring, joints, blocks, system: ringSystem(joints, blocks) };
 }
 
-export function ringForm({ profile, ring }: ResolvedScheme): RingForm {
+function ringForm({ profile, ring }: ResolvedScheme): RingForm {
   return {
     profile,
     thickness: { crown: ring.thickness, springing: ring.springingThickness },

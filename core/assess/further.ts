@@ -27,7 +27,9 @@ export function combinationAnswers(built: BuiltScheme): CombinationAnswer[] {
   const { joints, blocks, resolved } = built;
   return resolved.combinations.map((combination): CombinationAnswer => {
     const factor = factorsOf(combination, resolved);
-    const factored = blocks.map(({ forces }): Block => ({ forces: forces.map((force) => scaled(force, factor(force))) }));
+    const factored = blocks.map(({ forces }): Block => ({
+      forces: forces.map((force) => scaled(force, factor(force))),
+    }));
     const variable = new Set(resolved.loads.filter(({ action }) => action === 'variable').map(({ id }) => id));
     const rest = ringSystem(
       joints,

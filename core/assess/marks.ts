@@ -1,5 +1,5 @@
 import type { CrackMark } from '../checks/crack-reading.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Crack } from '../job/schema.ts';
 
 /** Crack marks on joint numbers: a mark placed along the intrados goes to the nearest joint. */

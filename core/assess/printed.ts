@@ -1,6 +1,6 @@
 /** Answers of the statics in the words and units of the assessment document. */
 import type { Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import { lineOfThrust } from '../statics/line.ts';
 import { motionsOf, thrustByVirtualWork, workOf } from '../statics/mechanism.ts';
 import { equilibriumResidual, type SpringingForce } from '../statics/proof.ts';

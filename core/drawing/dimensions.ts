@@ -4,7 +4,7 @@
  * let it be typed.
  */
 import type { Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import { hingedJoints, put, type Draught } from './draught.ts';
 import { heightAt } from './faces.ts';
 import { along, lettering, stroke } from './path.ts';

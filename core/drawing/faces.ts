@@ -1,7 +1,8 @@
 /** The two faces of a ring as paths: block by block, and run together from springing to springing. */
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
-import type { Outline, RingGeometry } from '../geometry/ring.ts';
+import type { Outline } from '../geometry/ring-blocks.ts';
+import type { RingGeometry } from '../geometry/ring.ts';
 
 const samePoint = (a: Point, b: Point): boolean => a.x === b.x && a.y === b.y;
 

@@ -1,6 +1,6 @@
 /** The stone itself: voussoirs with their true outlines, joints, what lies above, and the supports they spring from. */
 import type { Point } from '../geometry/point.ts';
-import type { Outline } from '../geometry/ring.ts';
+import type { Outline } from '../geometry/ring-blocks.ts';
 import { put, type Draught } from './draught.ts';
 import { along, linesTo, outlined, polygon, polyline, stroke } from './path.ts';
 import type { About, PathItem } from './scene.ts';

@@ -4,7 +4,7 @@
  */
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
-import type { Outline } from '../geometry/ring.ts';
+import type { Outline } from '../geometry/ring-blocks.ts';
 import { motionsOf, type Motion } from '../statics/mechanism.ts';
 import { put, type Draught } from './draught.ts';
 import { bodyOutline } from './faces.ts';

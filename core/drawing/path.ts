@@ -1,6 +1,6 @@
 /** Small figures that drawings are made of, as paths of lines and arcs in the scene's units. */
 import type { Edge } from '../geometry/curve.ts';
-import type { Outline } from '../geometry/ring.ts';
+import type { Outline } from '../geometry/ring-blocks.ts';
 import type { Point } from '../geometry/point.ts';
 import type { About, Align, Lettering, PathItem, TextItem } from './scene.ts';
 import type { Role } from './style.ts';

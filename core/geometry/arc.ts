@@ -1,3 +1,4 @@
+import { clampBetween } from './clamp.ts';
 import type { Edge, OffsettableCurve, Curve, ThicknessLaw } from './curve.ts';
 import { angleOf, arcMoments, type Angle, type Moments } from './moments.ts';
 import type { Point } from './point.ts';
@@ -17,7 +18,7 @@ export class Arc implements OffsettableCurve {
   readonly skyward = { from: Math.PI, to: 0 };
 
   highest(u0: number, u1: number): number {
-    return Math.min(Math.max(Math.PI / 2, Math.min(u0, u1)), Math.max(u0, u1));
+    return clampBetween(Math.PI / 2, u0, u1);
   }
 
   at(u: number): Point {

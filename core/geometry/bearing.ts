@@ -2,7 +2,7 @@
 import { ProblemError, type Problem } from '../job/problem.ts';
 import type { Ring } from '../job/schema.ts';
 import { between, distance, type Point } from './point.ts';
-import type { Joint } from './ring.ts';
+import type { Joint } from './stations.ts';
 
 export interface BearingLimits {
   readonly lostMortar: NonNullable<Ring['lostMortar']>;

@@ -19,6 +19,13 @@ export interface Piece {
   readonly extradosTo: number;
 }
 
+/** @throws RangeError when there is no such piece. */
+export function pieceAt(pieces: readonly Piece[], index: number): Piece {
+  const piece = pieces[index];
+  if (piece === undefined) throw new RangeError(`no piece ${index} among ${pieces.length}`);
+  return piece;
+}
+
 /** Ring thickness in metres at the crown and at both springings; it changes evenly along the intrados between them. */
 export interface Thickness {
   readonly crown: number;

@@ -1,3 +1,4 @@
+import { clampBetween } from './clamp.ts';
 import type { Curve, Edge, OffsettableCurve, ThicknessLaw } from './curve.ts';
 import type { Moments } from './moments.ts';
 import type { Point } from './point.ts';

@@ -5,7 +5,19 @@
  * `Assumed`; what is merely absent (no loads, no sway, level springings, no name) is filled without a word.
  */
 import type { Assumed } from './assumed.ts';
-import type { Above, Backing, Combination, Crack, Load, Masonry, Profile, Ring, Road, Scheme, Support } from './schema.ts';
+import type {
+  Above,
+  Backing,
+  Combination,
+  Crack,
+  Load,
+  Masonry,
+  Profile,
+  Ring,
+  Road,
+  Scheme,
+  Support,
+} from './schema.ts';
 
 /** Every field given; `null` only where the value is not known and nothing sensible stands in for it. */
 type Filled<T> = T extends unknown ? { readonly [Key in keyof T]-?: Exclude<T[Key], undefined> } : never;

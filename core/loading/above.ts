@@ -1,6 +1,7 @@
 /** What stands on the back of the ring: wall or fill, backing, layers, openings, and the side pressure of fill. */
 import { centroid, lineMoments, type Moments } from '../geometry/moments.ts';
-import type { RingGeometry, SkyFace } from '../geometry/ring.ts';
+import type { RingGeometry } from '../geometry/ring.ts';
+import type { SkyFace } from '../geometry/ring-blocks.ts';
 import type { ResolvedAbove, ResolvedBacking } from '../job/defaults.ts';
 import type { Problem } from '../job/problem.ts';
 import type { BlockForces } from './forces.ts';

@@ -3,7 +3,8 @@
  * plumb lines at the extrados ends of the joints and rests on the block beneath.
  */
 import type { Point } from '../geometry/point.ts';
-import type { RingGeometry, SkyFace } from '../geometry/ring.ts';
+import type { RingGeometry } from '../geometry/ring.ts';
+import type { SkyFace } from '../geometry/ring-blocks.ts';
 
 export interface Sky {
   /** The sky-facing stretch of each block; null where a block's back faces down. */

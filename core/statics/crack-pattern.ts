@@ -1,5 +1,5 @@
 /** The hinge patterns of the movements that commonly crack an arch, each found by the same programmes as the thrust. */
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Hinge } from './hinge.ts';
 import { greatestMultiplier } from './multiplier.ts';
 import { answerToMovement, type Opening, type SupportMovement } from './support-movement.ts';

@@ -1,6 +1,6 @@
 /** The line of thrust of one state: where the resultant crosses each joint, and with what force. */
 import { between, type Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import { momentAbout, type RingSystem } from './system.ts';
 
 /** s = (X0, Y0, M0), scaled as the system is. */
@@ -25,7 +25,7 @@ const parts = (system: RingSystem, s: State, j: number): { x: number; y: number 
 });
 
 /** Moment of the resultant at joint j about (px, py), all scaled. */
-export function resultantMoment(system: RingSystem, s: State, j: number, px: number, py: number): number {
+function resultantMoment(system: RingSystem, s: State, j: number, px: number, py: number): number {
   return (s[2] as number) - px * (s[1] as number) + py * (s[0] as number) + momentAbout(system.sums, j, px, py);
 }
 
@@ -61,17 +61,4 @@ export function lineOfThrust(system: RingSystem, joints: readonly Joint[], s: St
     const share = crossing(system, s, j);
     return share === null ? null : between(intrados, extrados, share);
   });
-}
-
-/** The least and greatest share at which the line crosses any joint, and where: within 0…1 the whole line is in the ring. */
-export function excursion(system: RingSystem, s: State): { least: number; greatest: number } {
-  let least = Infinity;
-  let greatest = -Infinity;
-  for (let j = 0; j < system.joints; j++) {
-    const share = crossing(system, s, j);
-    if (share === null) continue;
-    least = Math.min(least, share);
-    greatest = Math.max(greatest, share);
-  }
-  return { least, greatest };
 }

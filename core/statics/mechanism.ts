@@ -4,7 +4,7 @@
  * At a hinge on the extrados the joint opens at the intrados: the part to its left turns clockwise against the part to
  * its right; on the intrados it turns the other way. Small rotations: a motion is a turn about the origin and a shift.
  */
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Block } from '../loading/forces.ts';
 import type { TurningHinge } from './thrust.ts';
 

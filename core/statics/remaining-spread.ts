@@ -6,7 +6,7 @@
  * turns is taken as its middle line.
  */
 import { midpoint, type Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Block, BlockForce } from '../loading/forces.ts';
 import type { Hinge } from './hinge.ts';
 import { minimise } from './hinge-simplex.ts';

@@ -3,7 +3,7 @@
  * least work, and the hinges of that line are where it opens (Heyman 1966; Ochsendorf 2002; from memory). Spreading
  * gives the least thrust, closing the greatest, settlement its own.
  */
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import { distance, midpoint, type Point } from '../geometry/point.ts';
 import type { Hinge } from './hinge.ts';
 import { minimise } from './hinge-simplex.ts';

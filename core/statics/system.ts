@@ -7,7 +7,7 @@
  * and its moment about a point P is Mj − Px·Yj + Py·Xj. Everything is scaled: lengths by the width of the ring, forces
  * by the total of all forces, so that figures are of order one.
  */
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Block, BlockForce } from '../loading/forces.ts';
 

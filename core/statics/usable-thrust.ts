@@ -36,7 +36,7 @@ export function usableThrust(system: RingSystem, limits: JointLimits): UsableThr
   return { least: horizontal(least), greatest: horizontal(greatest) };
 }
 
-export function joined(first: Rows, second: Rows): Rows {
+function joined(first: Rows, second: Rows): Rows {
   const a = new Float64Array(first.a.length + second.a.length);
   a.set(first.a);
   a.set(second.a, first.a.length);

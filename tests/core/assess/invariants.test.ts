@@ -2,7 +2,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import type { SchemeAssessment } from '../../../core/assess/assessment.ts';
-import type { Above, Load, Profile, Scheme } from '../../../core/job/schema.ts';
+import type { Above, Load, Profile, Ring, Scheme } from '../../../core/job/schema.ts';
 import { assessed } from '../../support/assessed.ts';
 import { between, schemeOf, shapes } from '../../validation/random-arches.ts';
 import { totalLoad } from '../../validation/total-load.ts';
@@ -43,23 +43,44 @@ function scaledProfile(profile: Profile, k: number): Profile {
   return Object.fromEntries(scaled) as Profile;
 }
 
-const scaledAbove = (above: Above, k: number): Above => ({ ...above, height: (above.height ?? 0) * k });
+const scaledAbove = (above: Above, k: number): Above => ({
+  ...above,
+  height: (above.height ?? 0) * k,
+  layers: (above.layers ?? []).map((layer) => ({ ...layer, thickness: layer.thickness * k })),
+});
+
+const scaledRing = ({ thickness, springingThickness, lostMortar, ...ring }: Ring, k: number): Ring => ({
+  ...ring,
+  thickness: thickness * k,
+  springingThickness: (springingThickness ?? thickness) * k,
+  lostMortar: (lostMortar ?? []).map((lost) => ({ ...lost, depth: lost.depth * k })),
+});
 
 /** Lengths in the plane times k, masonry the same: its weights grow as k², and loads are made to. */
-const scaledLoad = (load: Load, k: number): Load =>
-  load.kind === 'strip'
-    ? { ...load, from: load.from * k, to: load.to * k, intensity: load.intensity * k }
-    : { ...load, x: load.x * k, force: load.force * k * k };
+function scaledLoad(load: Load, k: number): Load {
+  if (load.kind === 'strip') {
+    return { ...load, from: load.from * k, to: load.to * k, intensity: load.intensity * k };
+  }
+  const moved = { ...load, x: load.x * k, force: load.force * k * k };
+  return moved.kind === 'axle' ? { ...moved, patch: (moved.patch ?? 0) * k } : moved;
+}
 
 function scaledScheme(scheme: Scheme, k: number): Scheme {
+  const { above, backing } = scheme;
   return {
     ...scheme,
     profile: scaledProfile(scheme.profile, k),
-    ring: { ...scheme.ring, thickness: scheme.ring.thickness * k },
-    ...(scheme.above ? { above: scaledAbove(scheme.above, k) } : {}),
+    ring: scaledRing(scheme.ring, k),
+    ...(above ? { above: scaledAbove(above, k) } : {}),
+    ...(backing ? { backing: { ...backing, level: backing.level * k } } : {}),
     loads: (scheme.loads ?? []).map((load) => scaledLoad(load, k)),
   };
 }
+
+const heavier = <Part extends { readonly unitWeight?: number | undefined }>(part: Part, c: number) => ({
+  ...part,
+  unitWeight: (part.unitWeight ?? 0) * c,
+});
 
 describe('scale', () => {
   test('lengths times k at one breadth: thrusts times k², the same safety', () => {
@@ -86,15 +107,19 @@ describe('scale', () => {
   test('all weights and loads times c: all thrusts times c, the same line', () => {
     fc.assert(
       fc.property(anyScheme, between(0.05, 7), (scheme, c) => {
-        const heavier: Scheme = {
+        const { above, backing } = scheme;
+        const weighted: Scheme = {
           ...scheme,
-          masonry: { unitWeight: (scheme.masonry?.unitWeight ?? 0) * c },
-          ...(scheme.above ? { above: { ...scheme.above, unitWeight: (scheme.above.unitWeight ?? 0) * c } } : {}),
+          masonry: heavier(scheme.masonry ?? {}, c),
+          ...(above
+            ? { above: { ...heavier(above, c), layers: (above.layers ?? []).map((layer) => heavier(layer, c)) } }
+            : {}),
+          ...(backing ? { backing: heavier(backing, c) } : {}),
           loads: (scheme.loads ?? []).map((load) =>
             load.kind === 'strip' ? { ...load, intensity: load.intensity * c } : { ...load, force: load.force * c },
           ),
         };
-        expectSame(assessed(scheme), assessed(heavier), c);
+        expectSame(assessed(scheme), assessed(weighted), c);
       }),
       RUNS,
     );
@@ -112,6 +137,12 @@ describe('hand', () => {
     loads: (scheme.loads ?? []).map((load) =>
       load.kind === 'strip' ? { ...load, from: -load.to, to: -load.from } : { ...load, x: -load.x },
     ),
+    ring: {
+      ...scheme.ring,
+      lostMortar: (scheme.ring.lostMortar ?? []).map(({ joint, ...lost }) =>
+        joint === undefined ? lost : { ...lost, joint: (scheme.ring.voussoirs ?? 0) - joint },
+      ),
+    },
     sway: -(scheme.sway ?? 0),
   });
 
@@ -198,7 +229,11 @@ describe('more joints', () => {
       fc.property(anyScheme, (scheme) => {
         const few = assessed(scheme);
         const voussoirs = 2 * (scheme.ring.voussoirs ?? 0);
-        const many = assessed({ ...scheme, ring: { ...scheme.ring, voussoirs } });
+        // mortar lost at one joint is lost at the same place
+        const lostMortar = (scheme.ring.lostMortar ?? []).map((lost) =>
+          lost.joint === undefined ? lost : { ...lost, joint: 2 * lost.joint },
+        );
+        const many = assessed({ ...scheme, ring: { ...scheme.ring, voussoirs, lostMortar } });
         const slack = ROUNDING * totalLoad(few.model.blocks);
         if (many.thrust.stands && Math.abs((many.geometricSafety ?? 2) - 1) > TIE) expect(few.thrust.stands).toBe(true);
         if (!few.thrust.stands || !many.thrust.stands) return;
