@@ -27,8 +27,6 @@ export interface Outline {
   readonly edges: readonly Edge[];
 }
 
-const clampBetween = (u: number, a: number, b: number): number => Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
-
 /** Visits the stretches of one face between two places, left to right, each on one curve. */
 function eachStretch(
   pieces: readonly Piece[],

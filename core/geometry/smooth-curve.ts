@@ -273,8 +273,6 @@ export class SmoothCurve implements OffsettableCurve {
   }
 }
 
-const clampBetween = (u: number, a: number, b: number): number => Math.min(Math.max(u, Math.min(a, b)), Math.max(a, b));
-
 /** Between a place where `holds` is true and one where it is not: the last parameter at which it still is, by halving. */
 function lastWhere(holds: (u: number) => boolean, yes: number, no: number): number {
   for (let step = 0; step < HALVINGS; step++) {
