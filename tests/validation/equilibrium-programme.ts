@@ -6,7 +6,7 @@
  * Forces are scaled by the total of all loads and lengths by the mean length of the joints; moments are taken about the
  * middle of each block's left joint. Figures are then of order one, and HiGHS's own tolerances mean the same anywhere.
  */
-import loadHighs, { type ModelData, type ModelStatusCode } from 'highs';
+import loadHighs, { type ModelData } from 'highs';
 import type { Block, BlockForce, Joint, Point } from '../../core/assess/assessment.ts';
 
 /** What an assessment prints of the ring. */
@@ -22,8 +22,13 @@ export type Optimum =
 
 const highs = await loadHighs();
 
-/** The tightest that HiGHS takes; forces are of order one, so a thrust is good to about 1e-9 of the total load. */
-const TOLERANCE = 1e-10;
+/**
+ * The tightest that HiGHS takes; forces are of order one, so a thrust is good to about 1e-9 of the total load. On very
+ * thin rings it may lose its way so, and is asked again in another manner, at last with a little more room.
+ */
+const within = (tolerance: number) =>
+  ({ presolve: 'off', primal_feasibility_tolerance: tolerance, dual_feasibility_tolerance: tolerance }) as const;
+const WAYS = [within(1e-10), { ...within(1e-10), presolve: 'on' }, { ...within(1e-9), simplex_strategy: 4 }] as const;
 const { optimal, infeasible, unbounded, unboundedOrInfeasible } = highs.constants.modelStatus;
 
 /** Unknowns of one joint: columns 3j, 3j + 1 and 3j + 2. */
@@ -88,19 +93,12 @@ export class EquilibriumProgramme {
       const to = this.columns[column];
       if (to) to.cost += value;
     }
-    return highs.withModel(this.data(), (model) => {
-      model.options.set({
-        output_flag: false,
-        presolve: 'off',
-        primal_feasibility_tolerance: TOLERANCE,
-        dual_feasibility_tolerance: TOLERANCE,
-      });
-      model.run();
-      return readOptimum(model.getModelStatus(), () => ({
-        value: model.getObjectiveValue(),
-        unknowns: model.getSolution().colValue,
-      }));
-    });
+    const data = this.data();
+    for (const way of WAYS) {
+      const answer = solvedBy(data, way);
+      if (answer !== null) return answer;
+    }
+    throw new Error('HiGHS found no answer in any way');
   }
 
   /** The horizontal force of the left abutment on the ring, over the total load. */
@@ -245,16 +243,25 @@ function directionsOf(joint: Joint): { along: Point; square: Point } {
   return { along, square: { x: along.y, y: -along.x } };
 }
 
-function readOptimum(status: ModelStatusCode, found: () => { value: number; unknowns: Float64Array }): Optimum {
-  switch (status) {
-    case optimal:
-      return { kind: 'optimal', ...found() };
-    case infeasible:
-      return { kind: 'infeasible' };
-    case unbounded:
-    case unboundedOrInfeasible:
-      return { kind: 'unbounded' };
-    default:
-      throw new Error(`HiGHS ended with status ${status}`);
-  }
+/** The answer, or null where HiGHS gives up in this way. */
+function solvedBy(data: ModelData, way: (typeof WAYS)[number]): Optimum | null {
+  return highs.withModel(data, (model): Optimum | null => {
+    model.options.set({ output_flag: false, ...way });
+    try {
+      model.run();
+    } catch {
+      return null;
+    }
+    switch (model.getModelStatus()) {
+      case optimal:
+        return { kind: 'optimal', value: model.getObjectiveValue(), unknowns: model.getSolution().colValue };
+      case infeasible:
+        return { kind: 'infeasible' };
+      case unbounded:
+      case unboundedOrInfeasible:
+        return { kind: 'unbounded' };
+      default:
+        return null;
+    }
+  });
 }

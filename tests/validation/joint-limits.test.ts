@@ -98,7 +98,10 @@ describe('crushing', () => {
   const cases = (): Limited[] =>
     randomSchemes(EACH, 90).map((scheme, i) =>
       withLimits(
-        { ...scheme, ring: { ...scheme.ring, voussoirs: 4 + (i % 20) } },
+        {
+          ...scheme,
+          ring: { thickness: scheme.ring.thickness, voussoirs: 4 + (i % 20), joints: scheme.ring.joints ?? 'radial' },
+        },
         i % 3 === 0 ? 0.6 : null,
         STRENGTHS[i % STRENGTHS.length]!,
       ),

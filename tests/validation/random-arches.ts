@@ -63,26 +63,98 @@ function surveyed(span: number, rise: number, errors: readonly number[]): [numbe
   });
 }
 
-const LOADS = (span: number): fc.Arbitrary<Load[]> =>
-  fc
-    .array(
-      fc
-        .tuple(between(-0.48, 0.48), between(0.05, 0.4), between(0.5, 60), fc.boolean())
-        .map(([x, width, force, point]) =>
-          point
-            ? { kind: 'point' as const, x: x * span, force }
-            : { kind: 'strip' as const, from: x * span, to: (x + width) * span, intensity: force / 2 },
-        ),
-      { maxLength: 3 },
-    )
+const LOADS = (span: number): fc.Arbitrary<Load[]> => {
+  const point = fc
+    .tuple(between(-0.48, 0.48), between(0.5, 60))
+    .map(([x, force]) => ({ kind: 'point' as const, x: x * span, force }));
+  const axle = fc
+    .tuple(between(-0.48, 0.48), between(5, 80), between(0, 0.05), between(0, 1))
+    .map(([x, force, patch, dispersal]) => ({
+      kind: 'axle' as const,
+      x: x * span,
+      force,
+      patch: patch * span,
+      dispersal,
+    }));
+  const strip = fc
+    .tuple(between(-0.48, 0.48), between(0.05, 0.4), between(0.3, 30))
+    .map(([from, width, intensity]) => ({
+      kind: 'strip' as const,
+      from: from * span,
+      to: (from + width) * span,
+      intensity,
+    }));
+  return fc
+    .array(fc.oneof({ weight: 4, arbitrary: point }, { weight: 4, arbitrary: strip }, { weight: 1, arbitrary: axle }), {
+      maxLength: 3,
+    })
     .map((loads) => loads.map((load, i) => ({ id: `l${i + 1}`, ...load })));
+};
 
-const ABOVE: fc.Arbitrary<Above | undefined> = fc.oneof(
-  fc.constant(undefined),
+/** One in `weight` has it, the rest go without. */
+const atTimes = <Value>(weight: number, arbitrary: fc.Arbitrary<Value>): fc.Arbitrary<Value | null> =>
+  fc.oneof({ weight: weight - 1, arbitrary: fc.constant(null) }, { weight: 1, arbitrary });
+
+const LAYERS = fc.array(fc.record({ thickness: between(0.02, 0.2), unitWeight: between(16, 26) }), {
+  minLength: 1,
+  maxLength: 2,
+});
+
+const ABOVE: fc.Arbitrary<Above | null> = fc.oneof(
+  fc.constant(null),
   fc
-    .tuple(fc.constantFrom('wall' as const, 'fill' as const), between(0, 2), between(12, 24))
-    .map(([kind, height, unitWeight]) => ({ kind, height, unitWeight })),
+    .record({
+      kind: fc.constantFrom('wall' as const, 'fill' as const),
+      height: between(0, 2),
+      unitWeight: between(12, 24),
+      layers: atTimes(4, LAYERS),
+      sidePressure: atTimes(4, between(0, 0.5)),
+    })
+    .map(({ layers, sidePressure, ...above }) => ({
+      ...above,
+      ...(layers ? { layers } : {}),
+      ...(sidePressure !== null ? { sidePressure } : {}),
+    })),
 );
+
+/** Up to a fifth of the span over the springing line: below the crown of every shape but the flat one. */
+const BACKING = (span: number): fc.Arbitrary<NonNullable<Scheme['backing']>> =>
+  fc.record({
+    level: between(0, 0.1).map((share) => share * span),
+    counts: fc.constantFrom('weight' as const, 'masonry' as const),
+    unitWeight: between(18, 26),
+  });
+
+interface Figures {
+  readonly profile: Profile;
+  readonly step: number;
+  readonly slenderness: number;
+  readonly taper: number | null;
+  readonly lost: {
+    readonly face: 'intrados' | 'extrados';
+    readonly share: number;
+    readonly everywhere: boolean;
+  } | null;
+  readonly voussoirs: number;
+  readonly vertical: boolean;
+}
+
+function ringOf(span: number, { profile, slenderness, taper, lost, voussoirs, vertical }: Figures): Scheme['ring'] {
+  const thickness = slenderness * span;
+  return {
+    thickness,
+    voussoirs,
+    joints: vertical && profile.shape !== 'horseshoe' ? 'vertical' : 'radial',
+    ...(taper !== null && profile.shape !== 'flat' ? { springingThickness: taper * thickness } : {}),
+    ...(lost
+      ? {
+          lostMortar: [
+            { face: lost.face, depth: lost.share * thickness, ...(lost.everywhere ? {} : { joint: voussoirs >> 1 }) },
+          ],
+        }
+      : {}),
+  };
+}
 
 /** One scheme of the shape; thickness from far too thin to a fifth of the span. */
 export function schemeOf(shape: ProfileShape): fc.Arbitrary<Scheme> {
@@ -92,30 +164,40 @@ export function schemeOf(shape: ProfileShape): fc.Arbitrary<Scheme> {
         profile: SHAPES[shape](span),
         step: fc.oneof({ weight: 3, arbitrary: fc.constant(0) }, { weight: 1, arbitrary: between(-0.15, 0.15) }),
         slenderness: between(0.02, 0.2),
+        taper: atTimes(4, between(1, 1.8)),
+        lost: atTimes(
+          6,
+          fc.record({
+            face: fc.constantFrom('intrados' as const, 'extrados' as const),
+            share: between(0.02, 0.2),
+            everywhere: fc.boolean(),
+          }),
+        ),
         voussoirs: fc.integer({ min: 4, max: 80 }),
         vertical: fc.boolean(),
         breadth: between(0.3, 4),
         unitWeight: between(16, 27),
         above: ABOVE,
+        backing: atTimes(5, BACKING(span)),
         loads: LOADS(span),
         sway: fc.oneof({ weight: 2, arbitrary: fc.constant(0) }, { weight: 1, arbitrary: between(-0.3, 0.3) }),
       })
-      .map(({ profile, step, slenderness, voussoirs, vertical, breadth, unitWeight, above, loads, sway }) => ({
+      .map(({ breadth, unitWeight, above, backing, loads, sway, ...figures }) => ({
         id: 's1',
-        profile: profile.shape === 'measured' || step === 0 ? profile : { ...profile, step: step * span },
-        ring: {
-          thickness: slenderness * span,
-          voussoirs,
-          joints: vertical && shape !== 'horseshoe' ? ('vertical' as const) : ('radial' as const),
-        },
+        profile: steppedProfile(figures, span),
+        ring: ringOf(span, figures),
         breadth,
         masonry: { unitWeight },
         ...(above ? { above } : {}),
+        ...(backing && shape !== 'flat' && shape !== 'measured' ? { backing } : {}),
         loads,
         sway,
       })),
   );
 }
+
+const steppedProfile = ({ profile, step }: Figures, span: number): Profile =>
+  profile.shape === 'measured' || step === 0 ? profile : { ...profile, step: step * span };
 
 /** `each` schemes of every shape, the same for the same seed. */
 export function randomSchemes(each: number, seed: number): Scheme[] {

@@ -17,10 +17,11 @@ const pullAt = (scheme: Scheme, thickness: number): number =>
 
 describe('thinnest ring', () => {
   const cases = randomSchemes(30, 61)
-    // a load near a springing stands beside a thinner ring, which is refused
-    .map((scheme) => ({
+    // a load near a springing stands beside a thinner ring, and lost mortar may leave it nothing: both are refused
+    .map(({ ring: { thickness, voussoirs, joints }, loads, ...scheme }): Scheme => ({
       ...scheme,
-      loads: (scheme.loads ?? []).filter((load) => load.kind === 'strip' && load.from < 0),
+      ring: { thickness, ...(voussoirs ? { voussoirs } : {}), ...(joints ? { joints } : {}) },
+      loads: (loads ?? []).filter((load) => load.kind === 'strip' && load.from < 0),
     }))
     .map((scheme) => ({
       scheme,

@@ -18,6 +18,20 @@ const AGREED = 1e-6;
 /** A ring that stands or falls by less than this pull over the total load is a tie that HiGHS cannot call. */
 const TIE = 1e-7;
 
+/**
+ * Rings on which a search once stopped short: here endless thrust needs 0.78 of the joints, and a thrust that ends next
+ * to nothing of them.
+ */
+const HARD: readonly Scheme[] = [
+  {
+    id: 'thick-and-tapered',
+    profile: { shape: 'catenary', span: 5.4, rise: 1.14 },
+    ring: { thickness: 1.06, springingThickness: 1.89, voussoirs: 75, joints: 'vertical' },
+    breadth: 2,
+    masonry: { unitWeight: 25 },
+  },
+];
+
 interface Case {
   readonly scheme: Scheme;
   readonly result: SchemeAssessment;
@@ -27,7 +41,7 @@ interface Case {
 const cases: Case[] = [];
 
 beforeAll(() => {
-  for (const scheme of randomSchemes(EACH, SEED)) {
+  for (const scheme of [...HARD, ...randomSchemes(EACH, SEED)]) {
     const outcome = assessScheme({ id: 'a1', schemes: [scheme] }, scheme);
     if (!outcome.ok) throw new Error(`${outcome.problems[0]?.wrong ?? ''}: ${JSON.stringify(scheme)}`);
     const { result } = outcome.assessed;
