@@ -14,6 +14,15 @@ export interface Jet {
   readonly ddy: number;
 }
 
+/**
+ * Stretches of equal parameter, one after the other from `start`; within each the curve has all its derivatives and turns
+ * little. They stay where they are when only a part of the curve is taken.
+ */
+export interface Spans {
+  readonly start: number;
+  readonly step: number;
+}
+
 /** Chords in which a curve is drawn for a quarter turn of its direction: the sagitta stays under 1/3000 of the radius. */
 const CHORDS_PER_QUARTER_TURN = 32;
 /** Spans of quadrature over a whole face of an arch; ten Gauss points in each leave rounding as the only error. */
@@ -29,18 +38,21 @@ const LOOKS_PER_SPAN = 8;
 /** A curve given by its point and two derivatives; integrals by Gauss–Legendre, inverse questions by safeguarded Newton. */
 export class SmoothCurve implements OffsettableCurve {
   private lengthTable: Float64Array | null = null;
+  private readonly spans: Spans;
 
-  /** @param spans stretches of equal parameter; within each the curve has all its derivatives and turns little. */
+  /** @param spans where the curve is cut for quadrature; eighths of it where nothing is said. */
   constructor(
     readonly from: number,
     readonly to: number,
     private readonly jet: (u: number) => Jet,
-    private readonly spans = SPANS_OF_A_FACE,
-  ) {}
+    spans?: Spans,
+  ) {
+    this.spans = spans ?? { start: from, step: (to - from) / SPANS_OF_A_FACE };
+  }
 
   get hollowRadius(): number {
     let least = Infinity;
-    const looks = this.spans * LOOKS_PER_SPAN;
+    const looks = this.partsOf(this.from, this.to) * LOOKS_PER_SPAN;
     for (let i = 0; i <= looks; i++) {
       const { dx, dy, ddx, ddy } = this.jet(this.from + ((this.to - this.from) * i) / looks);
       const bend = (dx * ddy - dy * ddx) * this.direction;
@@ -163,7 +175,7 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   part(u0: number, u1: number): SmoothCurve {
-    return new SmoothCurve(u0, u1, this.jet, this.partsOf(u0, u1));
+    return new SmoothCurve(u0, u1, this.jet, this.spans);
   }
 
   sheared(slope: number): SmoothCurve {
@@ -203,18 +215,31 @@ export class SmoothCurve implements OffsettableCurve {
   /** Length from the start to u; negative before the start, where a face carried on past its end may lie. */
   private lengthTo(u: number): number {
     const table = (this.lengthTable ??= this.makeLengthTable());
-    const span = (this.to - this.from) / this.spans;
-    const index = Math.min(this.spans - 1, Math.max(0, Math.floor((u - this.from) / span)));
-    return (table[index] as number) + this.stretchLength(this.from + index * span, u);
+    const first = this.spanOf(this.from);
+    const index = Math.min(table.length - 1, Math.max(0, this.spanOf(u) - first));
+    return (table[index] as number) + this.stretchLength(this.spanStart(first + index), u);
   }
 
+  /** Length from the start to the beginning of each span that the curve enters. */
   private makeLengthTable(): Float64Array {
-    const table = new Float64Array(this.spans);
-    const span = (this.to - this.from) / this.spans;
-    for (let i = 1; i < this.spans; i++) {
-      table[i] = (table[i - 1] as number) + this.stretchLength(this.from + (i - 1) * span, this.from + i * span);
+    const first = this.spanOf(this.from);
+    const count = Math.max(1, Math.ceil((this.to - this.spans.start) / this.spans.step - ON_SPAN_END) - first);
+    const table = new Float64Array(count);
+    for (let i = 1; i < count; i++) {
+      table[i] =
+        (table[i - 1] as number) + this.stretchLength(this.spanStart(first + i - 1), this.spanStart(first + i));
     }
     return table;
+  }
+
+  private spanOf(u: number): number {
+    return Math.floor((u - this.spans.start) / this.spans.step + ON_SPAN_END);
+  }
+
+  /** Where a span begins within the curve: its own beginning, or the curve's. */
+  private spanStart(index: number): number {
+    const start = this.spans.start + index * this.spans.step;
+    return (start - this.from) * this.direction > 0 ? start : this.from;
   }
 
   /** Length of a stretch no longer than a span, negative when it runs against the curve. */
@@ -232,21 +257,21 @@ export class SmoothCurve implements OffsettableCurve {
 
   /** How many spans' worth of parameter lies between two places, one at least. */
   private partsOf(u0: number, u1: number): number {
-    return Math.max(1, Math.ceil((this.spans * Math.abs(u1 - u0)) / Math.abs(this.to - this.from) - ON_SPAN_END));
+    return Math.max(1, Math.ceil(Math.abs((u1 - u0) / this.spans.step) - ON_SPAN_END));
   }
 
   /** From `a` towards `b`: `b` itself, or the nearest end of a span on the way. */
   private withinSpan(a: number, b: number): number {
-    const span = (this.to - this.from) / this.spans;
-    const here = (a - this.from) / span;
-    const there = (b - this.from) / span;
+    const { start, step } = this.spans;
+    const here = (a - start) / step;
+    const there = (b - start) / step;
     const next = there > here ? Math.floor(here + ON_SPAN_END) + 1 : Math.ceil(here - ON_SPAN_END) - 1;
     const onTheWay = there > here ? next < there - ON_SPAN_END : next > there + ON_SPAN_END;
-    return onTheWay ? this.from + next * span : b;
+    return onTheWay ? start + next * step : b;
   }
 
   private ruleFor(stretch: number): GaussRule {
-    return 2 * this.spans * Math.abs(stretch) <= Math.abs(this.to - this.from) ? SIX_POINTS : TEN_POINTS;
+    return 2 * Math.abs(stretch) <= Math.abs(this.spans.step) ? SIX_POINTS : TEN_POINTS;
   }
 
   /** Where a function that rises through zero once along the curve is zero, or the end beyond which it is. */

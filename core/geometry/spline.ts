@@ -34,7 +34,7 @@ export function splineThrough(points: readonly Point[]): SmoothCurve {
       const [py, dy, ddy] = y(i, u - i);
       return { x: px, y: py, dx: dx * h, dy: dy * h, ddx: ddx * h * h, ddy: ddy * h * h };
     },
-    last,
+    { start: 0, step: 1 },
   );
 }
 
