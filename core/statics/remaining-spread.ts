@@ -5,6 +5,7 @@
  * Ochsendorf 2002, with hinges free to move; from memory). Blocks are rigid. A joint that has opened and no longer
  * turns is taken as its middle line.
  */
+import { afterwards, AT_REST, placed, turnTaking, type Placement } from '../geometry/placement.ts';
 import { midpoint, type Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/stations.ts';
 import type { Block, BlockForce } from '../loading/forces.ts';
@@ -27,6 +28,8 @@ export interface SpreadPlace {
   readonly hinges: readonly Hinge[];
   /** The ring as it stands there. */
   readonly joints: readonly Joint[];
+  /** How the left support, each block from left to right, and the right support came there. */
+  readonly placements: readonly Placement[];
 }
 
 export interface RemainingSpread {
@@ -83,6 +86,8 @@ interface MovedRing {
   readonly leftFaces: readonly Joint[];
   readonly rightFaces: readonly Joint[];
   readonly forces: readonly (readonly BlockForce[])[];
+  /** Of both supports and the blocks, as in `SpreadPlace`. */
+  readonly placements: readonly Placement[];
 }
 
 interface HingesNow {
@@ -96,6 +101,7 @@ const startingBody = (joints: readonly Joint[], blocks: readonly Block[]): Moved
   leftFaces: joints,
   rightFaces: joints,
   forces: blocks.map((block) => block.forces),
+  placements: Array.from({ length: blocks.length + 2 }, () => AT_REST),
 });
 
 /** Each joint as one line: where it has opened, the middle line of its two faces. */
@@ -120,22 +126,9 @@ function hingesNow(ring: MovedRing, { x, y }: Direction): HingesNow | null {
 }
 
 function placeOf(ring: MovedRing, answer: HingesNow): SpreadPlace {
-  return { moved: ring.moved, horizontal: answer.horizontal, hinges: answer.rows, joints: middleLines(ring) };
+  const { moved, placements } = ring;
+  return { moved, horizontal: answer.horizontal, hinges: answer.rows, joints: middleLines(ring), placements };
 }
-
-/** A rigid movement: turn about `about`, then shift. */
-interface Placement {
-  readonly cos: number;
-  readonly sin: number;
-  readonly about: Point;
-  readonly to: Point;
-}
-
-const placed = ({ cos, sin, about, to }: Placement, p: Point): Point => {
-  const x = p.x - about.x;
-  const y = p.y - about.y;
-  return { x: to.x + cos * x - sin * y, y: to.y + sin * x + cos * y };
-};
 
 /** The ring after the left support has gone one stride further; null when the two middle parts cannot reach. */
 function moveBy(ring: MovedRing, hinges: readonly Hinge[], direction: Direction, stride: number): MovedRing | null {
@@ -149,7 +142,7 @@ function moveBy(ring: MovedRing, hinges: readonly Hinge[], direction: Direction,
   const shifted = { x: first.x + direction.x * stride, y: first.y + direction.y * stride };
   const apex = thirdCorner(shifted, third, first, second, third);
   if (apex === null) return null;
-  const left: Placement = { cos: 1, sin: 0, about: first, to: shifted };
+  const left = turnTaking(0, first, shifted);
   const between12 = turned(first, second, shifted, apex);
   const between23 = turned(second, third, apex, third);
   // blocks left of the first hinge go with the left support, those right of the third stay
@@ -167,13 +160,17 @@ function moveBy(ring: MovedRing, hinges: readonly Hinge[], direction: Direction,
       const placement = of(k);
       return placement === null ? forces : forces.map((force) => ({ ...force, ...placed(placement, force) }));
     }),
+    placements: ring.placements.map((before, k) => {
+      const placement = of(k - 1);
+      return placement === null ? before : afterwards(before, placement);
+    }),
   };
 }
 
 /** The rigid movement that takes a to a2 and the direction of b with it. */
 function turned(a: Point, b: Point, a2: Point, b2: Point): Placement {
   const angle = Math.atan2(b2.y - a2.y, b2.x - a2.x) - Math.atan2(b.y - a.y, b.x - a.x);
-  return { cos: Math.cos(angle), sin: Math.sin(angle), about: a, to: a2 };
+  return turnTaking(angle, a, a2);
 }
 
 /** The corner over a2–c2 that keeps its distances |ab| and |bc| and its side; null when the two ends stand too far apart. */
