@@ -1,4 +1,4 @@
-import { figure } from '../quantity/figures.ts';
+import { figure, safetyFigure } from '../quantity/figures.ts';
 import { jointsInWords, type Check } from './check.ts';
 
 /** What the check needs to know of the ring. */
@@ -41,6 +41,9 @@ export function compressionOnly(state: CompressionState): Check {
   };
 }
 
+/** m; what lies below cannot be measured on stone. */
+const LEAST_MIDDLE = 0.001;
+
 function reason(state: CompressionState, demand: number | null, safety: number | null): string {
   const { stands, thickness, askedSafety } = state;
   if (!stands) {
@@ -58,5 +61,6 @@ function reason(state: CompressionState, demand: number | null, safety: number |
     safety >= askedSafety
       ? `at least the ${figure(askedSafety)} asked for`
       : `less than the ${figure(askedSafety)} asked for`;
-  return `A line of thrust fits within the middle ${figure(demand)} m of a ring of ${figure(thickness)} m: geometric safety ${figure(safety)}, ${against}.${supports}`;
+  const middle = demand < LEAST_MIDDLE ? 'a middle strip of less than a millimetre' : `the middle ${figure(demand)} m`;
+  return `A line of thrust fits within ${middle} of a ring of ${figure(thickness)} m: geometric safety ${safetyFigure(safety)}, ${against}.${supports}`;
 }

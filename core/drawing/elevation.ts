@@ -43,12 +43,13 @@ export function elevation(assessed: AssessedScheme, options: ElevationOptions): 
 }
 
 /** The finding in plain words, as it heads the findings and the sheet. */
-export function headlineOf({ thrust, geometricSafety }: AssessedScheme['result']): string {
+export function headlineOf({ thrust, geometricSafety, model }: AssessedScheme['result']): string {
   const { stands, least, greatest } = thrust;
   return headline({
     stands,
     geometricSafety,
     least: least?.horizontal ?? null,
     greatest: greatest?.horizontal ?? null,
+    alike: model.blocks.every(({ forces }) => forces.every(({ fx }) => fx === 0)),
   });
 }

@@ -17,16 +17,26 @@ import type { Face } from './text.ts';
 export const LAYERS = [
   'frame',
   'above',
+  'backing',
   'voussoirs',
+  'courses',
   'thrust-band',
   'joints',
+  'lost-mortar',
+  'as-it-was',
   'supports',
   'springing',
   'mechanism',
   'thrust-least',
   'thrust-greatest',
+  'thrust-chosen',
+  'openings',
   'hinges',
+  'cracks',
   'loads',
+  'stress',
+  'curve',
+  'axes',
   'reactions',
   'dimensions',
   'notes',
@@ -43,7 +53,8 @@ export type About =
   | { readonly kind: 'block'; readonly block: number }
   | { readonly kind: 'load'; readonly load: string }
   | { readonly kind: 'support'; readonly side: 'left' | 'right' }
-  | { readonly kind: 'thrust'; readonly state: 'least' | 'greatest' }
+  | { readonly kind: 'thrust'; readonly state: 'least' | 'greatest' | 'chosen' }
+  | { readonly kind: 'crack'; readonly crack: string }
   /** A field of the scheme by its path, as in `profile.span`. */
   | { readonly kind: 'field'; readonly path: string };
 
@@ -113,10 +124,15 @@ export function addItems(items: Items, layer: LayerName, ...added: readonly Scen
 
 type SceneHead = Pick<Scene, 'title' | 'description' | 'millimetresPerUnit'>;
 
-export function makeScene(head: SceneHead, items: Items, key: readonly KeyEntry[] = []): Scene {
+export function makeScene(
+  head: SceneHead,
+  items: Items,
+  key: readonly KeyEntry[] = [],
+  hide: readonly LayerName[] = [],
+): Scene {
   const layers = LAYERS.flatMap((name) => {
     const list = items.get(name) ?? [];
-    return list.length === 0 ? [] : [{ name, items: list }];
+    return list.length === 0 || hide.includes(name) ? [] : [{ name, items: list }];
   });
   const extent = new Extent();
   for (const { items: drawn } of layers) {

@@ -1,20 +1,18 @@
-/** Figures as they stand in a sentence or beside a dimension: a true minus sign, no exponent, never a minus before nothing. */
+/** Figures as they stand in a sentence or beside a dimension, with a decimal point. */
+import { formatFigure } from './format.ts';
 
-/** Rounded to `digits` significant figures, groups of three digits parted by a narrow space. */
-export function figure(value: number, digits = 3): string {
-  if (value === 0) return '0';
-  const decimals = Math.min(6, Math.max(0, digits - 1 - Math.floor(Math.log10(Math.abs(value)))));
-  return written(Math.abs(value).toFixed(decimals), value < 0);
-}
+/** Rounded to `digits` significant figures. */
+export const figure = (value: number, digits = 3): string => formatFigure(value, digits, { decimal: 'point' });
 
 /** Metres to the millimetre, with at least two decimals: 3.20, 0.355. */
 export function metres(value: number): string {
-  return written(Math.abs(value).toFixed(3).replace(/0$/, ''), value < 0);
+  const text = Math.abs(value).toFixed(3).replace(/0$/, '');
+  return value < 0 && /[1-9]/.test(text) ? `\u2212${text}` : text;
 }
 
-function written(digits: string, negative: boolean): string {
-  const [whole = '0', decimals] = digits.split('.');
-  const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, '\u202f') : whole;
-  const text = decimals === undefined ? grouped : `${grouped}.${decimals}`;
-  return negative && /[1-9]/.test(text) ? `\u2212${text}` : text;
-}
+/** Safeties above this say no more than that the ring is far thicker than it need be. */
+const MOST_SAFETY = 100;
+
+/** A geometric safety in words that go after "is": `1.93`, or `more than 100`. */
+export const safetyFigure = (safety: number): string =>
+  safety > MOST_SAFETY ? `more than ${MOST_SAFETY}` : figure(safety);

@@ -106,7 +106,7 @@ describe('scale', () => {
       );
       const last = bar.items.findLast((item) => item.kind === 'text');
       const [value, unit] = (last?.kind === 'text' ? last.text : '').split(' ');
-      const stated = Number(value?.replaceAll('\u202f', '')) / (unit === 'mm' ? 1000 : 1);
+      const stated = Number(value?.replaceAll('\u2009', '')) / (unit === 'mm' ? 1000 : 1);
       expect(stated).toBeCloseTo(bar.metres, 12);
       expect(Math.max(...xs) - Math.min(...xs)).toBeCloseTo(stated * millimetresPerMetre, 9);
       expect(bar.length).toBeGreaterThan(35);
