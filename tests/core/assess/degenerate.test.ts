@@ -168,6 +168,15 @@ describe('no weight', () => {
     expect(result.reactions?.left.vertical).toBeCloseTo(5, 9);
   });
 
+  test('weight near the springings alone: joints between carry nothing, and no figure suffers', () => {
+    sound({
+      profile: { shape: 'elliptical', span: 7.6, rise: 2.4 },
+      ring: { thickness: 0.17, voussoirs: 65, joints: 'radial' },
+      masonry: { unitWeight: 0 },
+      backing: { level: 0.24, counts: 'weight', unitWeight: 19.5 },
+    });
+  });
+
   test('an uplift alone cannot be held by compression', () => {
     const result = sound(
       semicircle(20, { masonry: { unitWeight: 0 }, loads: [{ id: 'l1', kind: 'point', x: 0.5, force: -10 }] }),
