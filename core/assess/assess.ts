@@ -136,7 +136,7 @@ function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare 
       askedSafety: asked.geometricSafety,
     }),
     sliding(masonry.friction, answer.stands ? neededFriction(system) : null),
-    crushing(masonry.strength, inside === null ? null : neededStrength(system, inside, breadth)),
+    crushing(masonry.strength, inside === null ? null : neededStrength(system, inside, breadth), answer.stands),
   ];
 }
 

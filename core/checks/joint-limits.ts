@@ -45,10 +45,11 @@ export function sliding(
   };
 }
 
-/** Strengths in MPa. `needed` is null when no line of thrust fits in the ring at all; `strength` when it is not known. */
+/** Strengths in MPa. `needed` is null when there is no line or no stress to speak of; `strength` when it is not known. */
 export function crushing(
   strength: number | null,
   needed: { readonly strength: number; readonly joint: number } | null,
+  stands: boolean,
 ): Check {
   const common = {
     id: 'ring.crushing',
@@ -60,7 +61,9 @@ export function crushing(
     return {
       ...common,
       ...nothing(strength),
-      because: 'No line of thrust fits in the ring, so there is no stress to hold against its strength.',
+      because: stands
+        ? 'Some joints carry next to nothing, so no line stays clear of every edge and no stress can be named.'
+        : 'No line of thrust fits in the ring, so there is no stress to hold against its strength.',
     };
   }
   const found = {

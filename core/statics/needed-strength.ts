@@ -31,8 +31,11 @@ const MOST_PLANES = 600;
  */
 const STEEPEST = 4;
 
-/** @param inside a state whose line stays clear of every edge; @param breadth m. */
-export function neededStrength(system: RingSystem, inside: State, breadth: number): NeededStrength {
+/**
+ * @param inside a state whose line stays clear of every edge; @param breadth m.
+ * @returns null when that state lies on an edge after all, as where joints carry next to nothing.
+ */
+export function neededStrength(system: RingSystem, inside: State, breadth: number): NeededStrength | null {
   const normal = normalForms(system);
   const moment = momentForms(system);
   const length = jointLengths(system);
@@ -70,7 +73,9 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
     const m = valueAt(moment, s, joint);
     const t = length[joint] as number;
     const sign = m < 0 ? -1 : 1;
-    const slope = n / (n * t - 2 * Math.abs(m));
+    const v = n * t - 2 * Math.abs(m);
+    if (!(v > 0)) return;
+    const slope = n / v;
     // divided through by the larger coefficient, so that a plane near an edge is of order one like every row
     const scale = 1 / Math.max(1, slope * slope);
     const byNormal = scale * (2 * slope - slope * slope * t);
@@ -86,6 +91,7 @@ export function neededStrength(system: RingSystem, inside: State, breadth: numbe
 
   let best = Float64Array.from({ length: 3 }, (_, k) => inside[k] as number);
   let top = worst(best);
+  if (!Number.isFinite(top.stress)) return null;
   addPlane(best, top.joint);
   let basis: readonly Multiplier[] = [];
   while (count + length.length < capacity) {

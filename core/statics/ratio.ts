@@ -8,7 +8,7 @@
  * of Crouzeix, Ferland & Schaible 1985; from memory). Each trial is a ratio that a line really attains, and the last z
  * is the proof that none attains less.
  */
-import { minimise, type Multiplier, type Rows } from './hinge-simplex.ts';
+import { minimise, type Multiplier, type Rows, type SimplexOutcome } from './hinge-simplex.ts';
 import type { State } from './line.ts';
 
 /** An affine form of the state at each joint: a·s + b, three coefficients a joint. */
@@ -50,10 +50,11 @@ export function leastRatio(p: JointForms, q: JointForms, firstWeights: Float64Ar
     if (outcome.kind === 'infeasible') return best;
     if (outcome.kind === 'unbounded') {
       // the slack falls without end as the thrust grows: below this ratio lies the one that loads no longer matter to
-      if (best !== null && best.state === null) return best;
       best = ratioAtEndlessThrust(p, q, firstWeights, hard);
       if (best === null || best.ratio === 0) return best;
-      ratio = best.ratio;
+      const within = ratioWithin(best.ratio, (lower) => minimise(slackRows(p, q, lower, weights, hard), [0, 0, 0, 1]));
+      if (within === null) return best;
+      ratio = within;
       continue;
     }
     basis = outcome.basis;
@@ -88,6 +89,19 @@ export function leastSlack(
 ): { slack: number; basis: readonly Multiplier[] } {
   const outcome = minimise(slackRows(p, q, 1, weights), [0, 0, 0, 1], start);
   return outcome.kind === 'optimal' ? { slack: outcome.value, basis: outcome.basis } : { slack: -Infinity, basis: [] };
+}
+
+/** How far below the ratio at endless thrust to look for states of finite thrust, as shares of it, far ones first. */
+const BELOW_ENDLESS = [1e-1, 1e-2, 1e-4, 1e-6, 1e-9];
+
+/** A ratio below the one at endless thrust that a state of finite thrust attains, or null. */
+function ratioWithin(endless: number, leastSlackAt: (ratio: number) => SimplexOutcome): number | null {
+  for (const share of BELOW_ENDLESS) {
+    const lower = endless * (1 - share);
+    const outcome = leastSlackAt(lower);
+    if (outcome.kind === 'optimal' && outcome.value < -SETTLED) return lower;
+  }
+  return null;
 }
 
 /** The least ratio of a thrust so great that the loads do not count: the forms without their loads, the q summing to one. */
