@@ -1,6 +1,7 @@
 /** Edits of the loads: scheme to scheme. Units: m from mid-span, kN, kN/m² on the whole breadth, + downwards. */
 import { LIMITS } from '../schema.ts';
 import type { Load, Scheme } from '../schema.ts';
+import { withoutLoadFactors } from './combinations.ts';
 import { nextId } from './ids.ts';
 import { held, patched, unlessSame } from './patch.ts';
 import type { Patch } from './patch.ts';
@@ -8,12 +9,13 @@ import { SMALLEST } from './shapes.ts';
 
 type Point = Extract<Load, { readonly kind: 'point' }>;
 type Strip = Extract<Load, { readonly kind: 'strip' }>;
+type Axle = Extract<Load, { readonly kind: 'axle' }>;
 
 /** A load before it has its id. */
-export type NewLoad = Omit<Point, 'id'> | Omit<Strip, 'id'>;
+export type NewLoad = Omit<Point, 'id'> | Omit<Strip, 'id'> | Omit<Axle, 'id'>;
 
 /** The fields of a load that can be typed; those that its kind does not have are passed over. */
-export type LoadPatch = Patch<Omit<Point, 'id' | 'kind'> & Omit<Strip, 'id' | 'kind'>>;
+export type LoadPatch = Patch<Omit<Point, 'id' | 'kind'> & Omit<Strip, 'id' | 'kind'> & Omit<Axle, 'id' | 'kind'>>;
 
 /** The id that the next added load will have. */
 export function nextLoadId(scheme: Scheme): string {
@@ -27,19 +29,24 @@ export function addLoad(scheme: Scheme, load: NewLoad): Scheme {
   return patched(scheme, { loads: [...loads, heldLoad({ id: nextLoadId(scheme), ...load })] });
 }
 
+/** Its own factors in the combinations go with it. */
 export function removeLoad(scheme: Scheme, loadId: string): Scheme {
   const loads = scheme.loads ?? [];
   const left = loads.filter(({ id }) => id !== loadId);
-  return left.length === loads.length ? scheme : patched(scheme, { loads: left });
+  return left.length === loads.length ? scheme : patched(withoutLoadFactors(scheme, loadId), { loads: left });
 }
 
 /** Sets the fields given; a strip whose ends cross is turned the right way round. */
 export function setLoad(scheme: Scheme, loadId: string, patch: LoadPatch): Scheme {
   return withLoad(scheme, loadId, (load) => {
-    const { name, x, force, from, to, intensity } = patch;
-    const named = 'name' in patch ? patched(load, { name }) : load;
+    const { name, action, x, force, from, to, intensity } = patch;
+    const named: Load = patched<Load>(load, {
+      ...('name' in patch ? { name } : {}),
+      ...('action' in patch ? { action } : {}),
+    });
     if (named.kind !== 'strip') {
-      return heldLoad({ ...named, x: known(x, named.x), force: known(force, named.force) });
+      const placed = { ...named, x: known(x, named.x), force: known(force, named.force) };
+      return heldLoad(placed.kind === 'axle' ? patched(placed, wheels(placed, patch)) : placed);
     }
     const [left, right] = [known(from, named.from), known(to, named.to)].sort((a, b) => a - b) as [number, number];
     return heldLoad({ ...named, from: left, to: right, intensity: known(intensity, named.intensity) });
@@ -77,6 +84,18 @@ function withLoad(scheme: Scheme, loadId: string, edit: (load: Load) => Load): S
 
 function known(value: number | undefined, otherwise: number): number {
   return value !== undefined && Number.isFinite(value) ? value : otherwise;
+}
+
+const MOST_DISPERSAL = 5;
+
+/** Print and spread of an axle where the patch names them; `undefined` leaves them to what is usually taken. */
+function wheels(axle: Axle, given: LoadPatch): Patch<Axle> {
+  const field = (name: 'patch' | 'dispersal', most: number): Patch<Axle> => {
+    if (!(name in given)) return {};
+    const value = given[name];
+    return { [name]: value === undefined ? undefined : held(value, 0, most, axle[name] ?? 0) };
+  };
+  return { ...field('patch', LIMITS.length), ...field('dispersal', MOST_DISPERSAL) };
 }
 
 function heldLoad(load: Load): Load {
