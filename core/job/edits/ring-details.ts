@@ -38,7 +38,8 @@ export function addLostMortar(scheme: Scheme, lost: LostMortar): Scheme {
 
 /** The loss at a place of the list changed; without a joint it is on every joint. */
 export function setLostMortar(scheme: Scheme, place: number, patch: Patch<LostMortar>): Scheme {
-  const edit = (lost: LostMortar): LostMortar => heldLost(patched(lost, patch), lost);
+  const edit = (lost: LostMortar): LostMortar =>
+    heldLost(patched(lost, { ...patch, face: patch.face ?? lost.face }), lost);
   return withRing(scheme, { lostMortar: withChanged(scheme.ring.lostMortar, place, edit) });
 }
 
@@ -49,7 +50,6 @@ export function removeLostMortar(scheme: Scheme, place: number): Scheme {
 function heldLost(lost: LostMortar, before: LostMortar): LostMortar {
   const { joint } = lost;
   return patched(lost, {
-    face: lost.face ?? before.face,
     depth: held(lost.depth, LEAST_DEPTH, LIMITS.length, before.depth),
     joint: joint === undefined ? undefined : held(Math.round(joint), 0, LIMITS.voussoirs, before.joint ?? 0),
   });
