@@ -23,7 +23,7 @@ import { thinnestRing } from '../statics/thinnest-ring.ts';
 import { thrustRange, type Extreme, type ThrustAnswer } from '../statics/thrust.ts';
 import { usableThrust } from '../statics/usable-thrust.ts';
 import type { Assessment, SchemeAssessment } from './assessment.ts';
-import { buildScheme, withThickness, type BuiltScheme } from './build.ts';
+import { buildScheme, withoutMeasuredBack, withThickness, type BuiltScheme } from './build.ts';
 import { loadFactors, swayCapacity } from './multiples.ts';
 import { printedMechanism, printedProof, printedReaction, printedThrust, springingForces } from './printed.ts';
 
@@ -154,7 +154,8 @@ function thinnest({ resolved, ring, system }: BuiltScheme, middle: MiddleShare |
   const { thickness } = resolved.ring;
   const joints = ring.joints;
   const width = Math.abs((joints[joints.length - 1]?.intrados.x ?? 0) - (joints[0]?.intrados.x ?? 0));
-  const systemFor = (trial: number) => buildScheme(withThickness(resolved, trial), 'rests-beside').system;
+  const soffit = withoutMeasuredBack(resolved);
+  const systemFor = (trial: number) => buildScheme(withThickness(soffit, trial), 'rests-beside').system;
   try {
     return thinnestRing(systemFor, { thickness, system, middle }, Math.max(thickness, THICKEST_OF_SPAN * width));
   } catch (error) {

@@ -39,16 +39,18 @@ function ringForm({ profile, ring }: ResolvedScheme): RingForm {
   };
 }
 
-/**
- * The same scheme with another ring thickness at the crown, m; at the springings it changes in proportion, and a
- * measured back gives way to an even ring.
- */
+/** The same scheme with another ring thickness at the crown, m; at the springings it changes in proportion. */
 export function withThickness(resolved: ResolvedScheme, thickness: number): ResolvedScheme {
-  const { ring, profile } = resolved;
+  const { ring } = resolved;
   const even = ring.springingThickness === ring.thickness;
   const springingThickness = even ? thickness : (ring.springingThickness * thickness) / ring.thickness;
-  const evenRing = { ...resolved, ring: { ...ring, thickness, springingThickness } };
-  if (profile.shape !== 'measured') return evenRing;
+  return { ...resolved, ring: { ...ring, thickness, springingThickness } };
+}
+
+/** The same scheme with a ring as thick as entered in place of a back that was measured. */
+export function withoutMeasuredBack(resolved: ResolvedScheme): ResolvedScheme {
+  const { profile } = resolved;
+  if (profile.shape !== 'measured' || profile.extrados === undefined) return resolved;
   const { shape, points, step } = profile;
-  return { ...evenRing, profile: { shape, points, step } };
+  return { ...resolved, profile: { shape, points, step } };
 }

@@ -17,7 +17,18 @@ export type CurvedProfile = Exclude<Profile, Of<'flat'>>;
 /** Angle within which two directions count as one: rounding of atan2 and acos on figures of order one, with room. */
 const SAME_ANGLE = 1e-9;
 
-export function intradosCurves(profile: CurvedProfile): OffsettableCurve[] {
+/** The intrados of a profile, left springing first; made once for a profile, as rings of many thicknesses stand on it. */
+export function intradosCurves(profile: CurvedProfile): readonly OffsettableCurve[] {
+  const held = MADE.get(profile);
+  if (held !== undefined) return held;
+  const curves = makeCurves(profile);
+  MADE.set(profile, curves);
+  return curves;
+}
+
+const MADE = new WeakMap<CurvedProfile, readonly OffsettableCurve[]>();
+
+function makeCurves(profile: CurvedProfile): OffsettableCurve[] {
   const curves = curvesWithLevelSprings(profile);
   const step = profile.shape === 'measured' ? 0 : (profile.step ?? 0);
   if (step === 0) return curves;

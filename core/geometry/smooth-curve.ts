@@ -38,6 +38,8 @@ const LOOKS_PER_SPAN = 8;
 /** A curve given by its point and two derivatives; integrals by Gauss–Legendre, inverse questions by safeguarded Newton. */
 export class SmoothCurve implements OffsettableCurve {
   private lengthTable: Float64Array | null = null;
+  /** Rings of many thicknesses are tried on one soffit; its joints stay where they are. */
+  private readonly lengthsFound = new Map<number, number>();
   private readonly spans: Spans;
 
   /** @param spans where the curve is cut for quadrature; eighths of it where nothing is said. */
@@ -109,13 +111,17 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   parameterAtLength(length: number): number {
-    return this.root(
+    const held = this.lengthsFound.get(length);
+    if (held !== undefined) return held;
+    const found = this.root(
       (u) => this.lengthTo(u) - length,
       (u) => {
         const { dx, dy } = this.jet(u);
-        return this.direction * Math.hypot(dx, dy);
+        return this.direction * Math.sqrt(dx * dx + dy * dy);
       },
     );
+    this.lengthsFound.set(length, found);
+    return found;
   }
 
   parameterAtX(x: number): number {
