@@ -42,7 +42,7 @@ function spreadAnswer(built: BuiltScheme): SpreadAnswer | null {
 function axleAnswers(built: BuiltScheme): AxleAnswer[] {
   return built.resolved.loads.flatMap((load): AxleAnswer[] => {
     if (load.kind !== 'axle') return [];
-    const envelope = axleEnvelope(built, load, AXLE_PLACES, () => true);
+    const envelope = axleEnvelope(built, load, AXLE_PLACES, () => true, load.id);
     const worst = envelope?.worst ?? null;
     return [
       {

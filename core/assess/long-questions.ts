@@ -7,8 +7,9 @@ import type { BlockForces } from '../loading/forces.ts';
 import type { Hinge } from '../statics/hinge.ts';
 import { greatestMultiplier } from '../statics/multiplier.ts';
 import { remainingSpread, type Direction, type RemainingSpread } from '../statics/remaining-spread.ts';
-import { sumsOf } from '../statics/system.ts';
+import { ringSystem, sumsOf } from '../statics/system.ts';
 import type { BuiltScheme } from './build.ts';
+import { withoutForces } from './multiples.ts';
 import { plainHinges } from './printed.ts';
 
 /** Called with the share of the way done; returning false gives the question up. */
@@ -36,9 +37,21 @@ export interface AxleEnvelope {
   readonly worst: AxlePlace | null;
 }
 
-/** The load factor of an axle at even steps across the ring; null when the ring does not stand by itself or it was given up. */
-export function axleEnvelope(built: BuiltScheme, axle: Axle, steps: number, progress: Progress): AxleEnvelope | null {
-  const { system, ring, blocks, resolved } = built;
+/**
+ * The load factor of an axle at even steps across the ring, beside all loads of the scheme.
+ * @param instead a load of the scheme that it stands in place of, such as the axle itself where it was entered.
+ * @returns null when the ring does not stand by itself, or when it was given up.
+ */
+export function axleEnvelope(
+  built: BuiltScheme,
+  axle: Axle,
+  steps: number,
+  progress: Progress,
+  instead?: string,
+): AxleEnvelope | null {
+  const { ring, joints, resolved } = built;
+  const blocks = instead === undefined ? built.blocks : withoutForces(built.blocks, instead);
+  const system = instead === undefined ? built.system : ringSystem(joints, blocks);
   const sky = skyOver(ring);
   const surface = topLevel(ring, resolved) + layersHeight(resolved.above.layers);
   const ground = { sky, breadth: resolved.breadth, surface };

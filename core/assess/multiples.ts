@@ -7,13 +7,14 @@ import type { LoadFactor } from './assessment.ts';
 import type { BuiltScheme } from './build.ts';
 import { plainHinges } from './printed.ts';
 
-const without = (blocks: readonly Block[], from: string): Block[] =>
+/** The blocks without the forces that come from one source. */
+export const withoutForces = (blocks: readonly Block[], from: string): Block[] =>
   blocks.map(({ forces }) => ({ forces: forces.filter((force) => force.from !== from) }));
 
 /** The factor of each load by itself, the others staying as they are. */
 export function loadFactors({ resolved, joints, blocks }: BuiltScheme): LoadFactor[] {
   return resolved.loads.map(({ id }) => {
-    const rest = ringSystem(joints, without(blocks, id));
+    const rest = ringSystem(joints, withoutForces(blocks, id));
     const set = sumsOf(rest.frame, blocks, ({ forces }) => forces.filter(({ from }) => from === id));
     const answer = greatestMultiplier(rest, set);
     return answer.kind === 'limit'
@@ -27,7 +28,7 @@ export function loadFactors({ resolved, joints, blocks }: BuiltScheme): LoadFact
  * Null when the ring does not stand upright, or when no acceleration moves it.
  */
 export function swayCapacity({ joints, blocks }: BuiltScheme): number | null {
-  const rest = ringSystem(joints, without(blocks, 'sway'));
+  const rest = ringSystem(joints, withoutForces(blocks, 'sway'));
   let least: number | null = null;
   for (const direction of [1, -1]) {
     const set = sumsOf(rest.frame, blocks, ({ forces }) => swayForces(forces, direction));
