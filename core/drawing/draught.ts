@@ -1,10 +1,13 @@
 /** What the parts of one elevation share while it is drawn: the arch, its answers, the scale, and the room taken. */
 import type { AssessedScheme } from '../assess/assess.ts';
+import { layersHeight } from '../loading/above.ts';
 import { topLevel } from '../loading/load-ring.ts';
 import { skyOver } from '../loading/sky.ts';
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
+import type { Joint } from '../geometry/stations.ts';
 import { blockBack, blockSoffit, drawnJoints, mergeArcs } from './faces.ts';
+import type { MovedRing } from './moved-ring.ts';
 import { Places } from './places.ts';
 import { addItems, type Items, type KeyEntry, type LayerName, type SceneItem } from './scene.ts';
 
@@ -25,10 +28,27 @@ export interface Draught extends AssessedScheme {
   /** Both faces from left springing to right. */
   readonly soffit: FacePath;
   readonly back: FacePath;
-  /** Where what lies above ends on paper, m, and whether it really goes on further up. */
-  readonly top: { readonly level: number; readonly broken: boolean };
+  readonly top: Top;
+  /** The ring after a movement, where it is drawn so. */
+  readonly moved: MovedRing | null;
+  /** The ring's joints as they are drawn, moved or not. */
+  readonly standing: readonly Joint[];
   /** Ends of the back that faces the sky: what lies above stands between them. */
   readonly sky: { readonly left: Point; readonly right: Point };
+}
+
+/** Where what lies above ends on paper, m. */
+export interface Top {
+  /** Of the wall or fill. */
+  readonly level: number;
+  /** Whether it really goes on further up. */
+  readonly broken: boolean;
+  /** Of the layers on it. */
+  readonly surface: number;
+  /** Drawn thickness of the layers over their real one: 1 unless they would dwarf the arch. */
+  readonly layerScale: number;
+  /** Where the surface really lies, m. */
+  readonly trueSurface: number;
 }
 
 export interface FacePath {
@@ -39,18 +59,19 @@ export interface FacePath {
 /** A wall taller than this share of the arch's larger measure is broken off on paper. */
 const TALLEST_ABOVE = 0.4;
 
-export function beginDraught(assessed: AssessedScheme, millimetresPerMetre: number, length: LengthText): Draught {
-  const { ring, resolved } = assessed;
+export function beginDraught(
+  assessed: AssessedScheme,
+  millimetresPerMetre: number,
+  length: LengthText,
+  moved: MovedRing | null = null,
+): Draught {
+  const { ring } = assessed;
   const mm = (millimetres: number): number => millimetres / millimetresPerMetre;
   const blocks = ring.blocks.map((_, block) => block);
   const first = ring.joints[0]!;
   const soffit = { start: first.intrados, edges: mergeArcs(blocks.flatMap((block) => blockSoffit(ring, block))) };
   const back = { start: first.extrados, edges: mergeArcs(blocks.flatMap((block) => blockBack(ring, block))) };
   const { left, right } = skyOver(ring);
-  const level = topLevel(ring, resolved);
-  const crown = ring.crownExtrados.y;
-  const tallest = Math.max(right.x - left.x, crown) * TALLEST_ABOVE + mm(12);
-  const broken = level - crown > tallest;
   return {
     ...assessed,
     millimetresPerMetre,
@@ -62,8 +83,27 @@ export function beginDraught(assessed: AssessedScheme, millimetresPerMetre: numb
     joints: drawnJoints(ring, mm(CLOSEST_JOINTS)),
     soffit,
     back,
-    top: { level: broken ? crown + tallest : level, broken },
+    top: topOf(assessed, Math.max(right.x - left.x, ring.crownExtrados.y) * TALLEST_ABOVE + mm(12)),
     sky: { left, right },
+    moved,
+    standing: moved?.joints ?? ring.joints,
+  };
+}
+
+function topOf({ ring, resolved }: AssessedScheme, tallest: number): Top {
+  const { above } = resolved;
+  const crown = ring.crownExtrados.y;
+  const real = topLevel(ring, resolved);
+  const broken = real - crown > tallest;
+  const level = broken ? crown + tallest : real;
+  const layers = layersHeight(above.layers);
+  const drawn = above.kind === 'none' ? 0 : Math.min(layers, tallest);
+  return {
+    level,
+    broken,
+    surface: level + drawn,
+    layerScale: layers === 0 ? 1 : drawn / layers,
+    trueSurface: real + layers,
   };
 }
 
@@ -73,8 +113,9 @@ const CLOSEST_JOINTS = 0.8;
 export const put = (draught: Draught, layer: LayerName, ...items: readonly SceneItem[]): void =>
   addItems(draught.items, layer, ...items);
 
-/** Joints at which some state of the ring hinges. */
-export function hingedJoints({ result }: AssessedScheme): ReadonlySet<number> {
+/** Joints at which some state of the ring hinges, or those that gape where it is drawn moved. */
+export function hingedJoints({ result, moved }: Draught): ReadonlySet<number> {
+  if (moved !== null) return new Set(moved.openings.map(({ joint }) => joint));
   const { least, greatest } = result.thrust;
   const hinges = [...(least?.hinges ?? []), ...(greatest?.hinges ?? []), ...(result.mechanism?.hinges ?? [])];
   return new Set(hinges.map(({ joint }) => joint));

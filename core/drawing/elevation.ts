@@ -1,19 +1,36 @@
 /** The elevation of one arch: the drawing that the board shows, and the one that goes onto the sheet. */
 import type { AssessedScheme } from '../assess/assess.ts';
 import { headline } from '../checks/headline.ts';
+import { metres } from '../quantity/figures.ts';
+import { drawAbove } from './above.ts';
+import { drawChosen, type ChosenLine } from './chosen.ts';
+import { drawCracks } from './cracks.ts';
 import { drawDimensions } from './dimensions.ts';
 import { beginDraught, type LengthText } from './draught.ts';
-import { metres } from '../quantity/figures.ts';
 import { drawLoads } from './loads.ts';
 import { drawMasonry } from './masonry.ts';
 import { drawMechanism } from './mechanism.ts';
+import { drawMoved, type MovedPicture } from './moved.ts';
 import { drawNotes } from './notes.ts';
 import { drawReactions } from './reactions.ts';
-import { makeScene, type Scene } from './scene.ts';
+import { makeScene, type LayerName, type Scene } from './scene.ts';
 import { plainText } from './text.ts';
 import { drawThrust } from './thrust.ts';
 
-export interface ElevationOptions {
+/** What is laid over the elevation, or left off it, to show one answer. */
+export interface Overlays {
+  /** A chosen or hand-drawn line of thrust, solid, with the places where it leaves the ring. */
+  readonly chosen?: ChosenLine;
+  /**
+   * The ring after a movement, with its hinges open and its first place dashed. Lines of thrust and reactions of the
+   * ring as it stands are left off then.
+   */
+  readonly moved?: MovedPicture;
+  /** Layers to leave off. Lettering keeps the places that it has with them. */
+  readonly hide?: readonly LayerName[];
+}
+
+export interface ElevationOptions extends Overlays {
   /** Paper millimetres per metre of the arch: 50 at 1:20. On a screen, pixels per metre over pixels per millimetre. */
   readonly millimetresPerMetre: number;
   /** How lengths are lettered; metres where not given. */
@@ -25,20 +42,28 @@ export interface ElevationOptions {
  * are no lines of thrust, and the mechanism is drawn where the assessment has one.
  */
 export function elevation(assessed: AssessedScheme, options: ElevationOptions): Scene {
-  const { millimetresPerMetre, length = metres } = options;
-  const draught = beginDraught(assessed, millimetresPerMetre, length);
-  drawMasonry(draught);
-  drawThrust(draught);
-  drawMechanism(draught);
+  const { millimetresPerMetre, length = metres, chosen, moved, hide } = options;
+  const draught = beginDraught(assessed, millimetresPerMetre, length, moved?.ring ?? null);
+  drawAbove(draught);
+  if (moved === undefined) {
+    drawMasonry(draught);
+    drawThrust(draught);
+    drawMechanism(draught);
+  } else {
+    drawMoved(draught, moved);
+  }
+  if (chosen !== undefined) drawChosen(draught, chosen);
   drawLoads(draught);
+  drawCracks(draught);
   drawDimensions(draught);
-  drawReactions(draught);
+  if (moved === undefined) drawReactions(draught);
   drawNotes(draught);
   const title = plainText(assessed.result.name);
   return makeScene(
     { title, description: headlineOf(assessed.result), millimetresPerUnit: millimetresPerMetre },
     draught.items,
     draught.key,
+    hide,
   );
 }
 

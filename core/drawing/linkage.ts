@@ -5,7 +5,7 @@
  */
 import { placed, turnOf, turnTaking, type Placement } from '../geometry/placement.ts';
 import { distance, midpoint, type Point } from '../geometry/point.ts';
-import type { Joint } from '../geometry/ring.ts';
+import type { Joint } from '../geometry/stations.ts';
 import type { Motion } from '../statics/mechanism.ts';
 
 /** How two neighbours move against each other at a joint: a turn about a point of it, or a parting. */
@@ -27,8 +27,11 @@ export function placementsOf(joints: readonly Joint[], motions: readonly Motion[
   const links = linksOf(joints, motions);
   const left = abutment(joints[0]!, motions[0]!, factor);
   const right = abutment(joints.at(-1)!, motions.at(-1)!, factor);
-  const turns = closedTurns(links, factor, left, right, joints[0]!);
-  return chain(links, turns, factor, right, motions.length);
+  const ofLinks = hung(links, closedTurns(links, factor, left, right, joints[0]!), factor, right);
+  return motions.map((_, part) => {
+    const next = links.findIndex(({ joint }) => joint >= part);
+    return next < 0 ? right : ofLinks[next]!;
+  });
 }
 
 /** A support turns about the middle of its springing joint, which goes straight. */
@@ -59,27 +62,17 @@ function linksOf(joints: readonly Joint[], motions: readonly Motion[]): Link[] {
 /** Share of a joint within which a centre of turning counts as at its end. */
 const ON_END = 1e-6;
 
-/** The chain hung from the right support, part by part leftwards. */
-function chain(
-  links: readonly Link[],
-  turns: readonly number[],
-  factor: number,
-  right: Placement,
-  parts: number,
-): Placement[] {
-  const placements: Placement[] = [];
+/** Placements of the parts left of each link, hung from the right support one on the other. */
+function hung(links: readonly Link[], turns: readonly number[], factor: number, right: Placement): Placement[] {
+  const found: Placement[] = [];
   let placement = right;
-  let next = links.length - 1;
-  for (let part = parts - 1; part >= 0; part--) {
-    for (; next >= 0 && links[next]!.joint === part; next--) {
-      const { about, shift } = links[next]!;
-      const { x, y } = placed(placement, about);
-      const to = { x: x + shift.x * factor, y: y + shift.y * factor };
-      placement = turnTaking(turnOf(placement) + turns[next]!, about, to);
-    }
-    placements.push(placement);
+  for (let i = links.length - 1; i >= 0; i--) {
+    const { about, shift } = links[i]!;
+    const { x, y } = placed(placement, about);
+    placement = turnTaking(turnOf(placement) + turns[i]!, about, { x: x + shift.x * factor, y: y + shift.y * factor });
+    found[i] = placement;
   }
-  return placements.reverse();
+  return found;
 }
 
 /**
@@ -100,11 +93,15 @@ function closedTurns(
   const target = placed(left, middle);
   const reach = Math.max(...links.map(({ about }) => distance(about, middle)), AS_ONE);
   for (let step = 0; step < NEWTON_STEPS; step++) {
-    const [end] = chain(links, turns, factor, right, 1 + Math.max(...links.map(({ joint }) => joint)) + 1);
-    const at = placed(end!, middle);
-    const error = [angleBetween(turnOf(left), turnOf(end!)) * reach, target.x - at.x, target.y - at.y];
+    const parts = hung(links, turns, factor, right);
+    const at = placed(parts[0]!, middle);
+    const error = [angleBetween(turnOf(left), turnOf(parts[0]!)) * reach, target.x - at.x, target.y - at.y];
     if (Math.hypot(...error) <= AS_ONE * reach) break;
-    const columns = columnsOf(links, turns, factor, right, at, reach);
+    // a turn swings the left end about its hinge, which goes with the part at its right
+    const columns = links.map(({ about }, i) => {
+      const hinge = placed(parts[i + 1] ?? right, about);
+      return [reach, hinge.y - at.y, at.x - hinge.x];
+    });
     const correction = leastCorrection(columns, free, error);
     if (correction === null) break;
     turns = turns.map((turn, i) => turn + correction[i]!);
@@ -114,23 +111,6 @@ function closedTurns(
 
 const angleBetween = (to: number, from: number): number => Math.atan2(Math.sin(to - from), Math.cos(to - from));
 
-/** How the left end answers to each turn: it swings about that hinge, where the chain now has it. */
-function columnsOf(
-  links: readonly Link[],
-  turns: readonly number[],
-  factor: number,
-  right: Placement,
-  end: Point,
-  reach: number,
-): number[][] {
-  return links.map(({ about, joint }, i) => {
-    // the hinge is moved by all that hangs to its right, and not by its own turn
-    const [part] = chain(links.slice(i + 1), turns.slice(i + 1), factor, right, joint + 2).slice(joint + 1);
-    const hinge = placed(part!, about);
-    return [reach, -(end.y - hinge.y), end.x - hinge.x];
-  });
-}
-
 /** The smallest change of the free turns that meets the error, x = Jᵀ (J Jᵀ)⁻¹ e; null where the hinges stand in line. */
 function leastCorrection(
   columns: readonly (readonly number[])[],
@@ -138,8 +118,7 @@ function leastCorrection(
   error: readonly number[],
 ): number[] | null {
   const used = columns.filter((_, i) => free[i]);
-  const product = (p: number, q: number): number =>
-    used.reduce((sum, column) => sum + column[p]! * column[q]!, 0);
+  const product = (p: number, q: number): number => used.reduce((sum, column) => sum + column[p]! * column[q]!, 0);
   const g = [0, 1, 2].map((p) => [0, 1, 2].map((q) => product(p, q)));
   const weights = solved(g, error);
   if (weights === null) return null;
@@ -151,9 +130,11 @@ function solved(matrix: readonly (readonly number[])[], right: readonly number[]
   const rows = matrix.map((row, i) => [...row, right[i]!]);
   const size = Math.max(...matrix.flat().map(Math.abs));
   for (let k = 0; k < 3; k++) {
-    const pivot = rows.slice(k).reduce((best, row, i) => (Math.abs(row[k]!) > Math.abs(rows[best]![k]!) ? k + i : best), k);
+    const pivot = rows
+      .slice(k)
+      .reduce((best, row, i) => (Math.abs(row[k]!) > Math.abs(rows[best]![k]!) ? k + i : best), k);
     [rows[k], rows[pivot]] = [rows[pivot]!, rows[k]!];
-    const row = rows[k];
+    const row = rows[k]!;
     if (!(Math.abs(row[k]!) > AS_ONE * size)) return null;
     for (const other of rows) {
       if (other === row) continue;

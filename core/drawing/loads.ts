@@ -2,6 +2,7 @@
 import type { Point } from '../geometry/point.ts';
 import { put, type Draught } from './draught.ts';
 import { heightAt } from './faces.ts';
+import { axleSpread } from './axles.ts';
 import { labelOf, LETTERS, planLoads, type PlacedLoad, type StripLoad } from './load-labels.ts';
 import { arrowhead, lettering, stroke } from './path.ts';
 import type { About, PathItem, TextItem } from './scene.ts';
@@ -20,7 +21,10 @@ export function drawLoads(draught: Draught): void {
   const { placed, numbered, leftOut } = planLoads(draught);
   const rows = placed.reduce((most, { load, row }) => (load.kind === 'strip' ? Math.max(most, row + 1) : most), 0);
   const lowestTop = baseOf(draught) + draught.mm(rows * ROW_HEIGHT + POLE);
-  for (const { load, row } of placed) if (load.kind === 'strip') drawStrip(draught, load, row);
+  for (const { load, row } of placed) {
+    if (load.kind === 'strip') drawStrip(draught, load, row);
+    if (load.kind === 'axle') putPaths(draught, axleSpread(draught, load, aboutLoad({ load })));
+  }
   for (const load of placed) drawLabel(draught, load, lowestTop);
   if (numbered) {
     draught.resolved.loads.forEach((load, i) => draught.key.push({ mark: String(i + 1), meaning: labelOf(load) }));
@@ -32,13 +36,13 @@ const aboutLoad = ({ load }: Pick<PlacedLoad, 'load'>): About => ({ kind: 'load'
 
 /** The level over which loads are drawn, m. */
 const baseOf = ({ resolved, top, ring }: Draught): number =>
-  resolved.above.kind === 'none' ? ring.crownExtrados.y : top.level;
+  resolved.above.kind === 'none' ? ring.crownExtrados.y : top.surface;
 
 /** Where an arrow's point touches: the top of what lies above, or the back of a bare ring. */
 const surfaceAt = (draught: Draught, x: number): number =>
   draught.resolved.above.kind === 'none'
     ? (heightAt(draught.back, x) ?? draught.ring.crownExtrados.y)
-    : draught.top.level;
+    : draught.top.surface;
 
 const barOf = (draught: Draught, row: number): number => baseOf(draught) + draught.mm(row * ROW_HEIGHT + STRIP_HEIGHT);
 

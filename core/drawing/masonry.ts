@@ -1,14 +1,19 @@
-/** The stone itself: voussoirs with their true outlines, joints, what lies above, and the supports they spring from. */
+/** The stone itself: voussoirs with their true outlines, courses, joints with mortar lost, and the supports. */
 import type { Point } from '../geometry/point.ts';
 import type { Outline } from '../geometry/ring-blocks.ts';
+import type { Joint } from '../geometry/stations.ts';
+import { drawCourses } from './courses.ts';
 import { put, type Draught } from './draught.ts';
-import { along, linesTo, outlined, polygon, polyline, stroke } from './path.ts';
-import type { About, PathItem } from './scene.ts';
+import { drawLostMortar } from './lost-mortar.ts';
+import { along, linesTo, outlined, stroke } from './path.ts';
+import type { About } from './scene.ts';
 
 export function drawMasonry(draught: Draught): void {
-  drawAbove(draught);
   drawVoussoirs(draught);
-  drawSupports(draught);
+  drawCourses(draught);
+  drawLostMortar(draught);
+  const { joints } = draught.ring;
+  drawSupports(draught, joints[0]!, joints.at(-1)!);
 }
 
 function drawVoussoirs(draught: Draught): void {
@@ -43,48 +48,12 @@ function corners({ ring }: Draught, left: number, right: number): [Point, Point,
   return [a.intrados, b.intrados, b.extrados, a.extrados];
 }
 
-function drawAbove(draught: Draught): void {
-  const { resolved, ring, sky, top, joints, mm } = draught;
-  if (resolved.above.kind === 'none') return;
-  const about: About = { kind: 'field', path: 'above.height' };
-  const topLeft = { x: sky.left.x, y: top.level };
-  const topRight = { x: sky.right.x, y: top.level };
-  // The ring is painted over the lower edge of this figure, so mid-ring is near enough for it.
-  const midRing = joints.map((joint) => {
-    const { intrados, extrados } = ring.joints[joint]!;
-    return { x: (intrados.x + extrados.x) / 2, y: (intrados.y + extrados.y) / 2 };
-  });
-  put(draught, 'above', polygon('above', [sky.left, topLeft, topRight, sky.right, ...midRing.reverse()], about));
-  const edges = [
-    polyline('above-edge', [sky.left, topLeft]),
-    polyline('above-edge', [sky.right, topRight]),
-    top.broken ? breakLine(topLeft, topRight, mm) : stroke('above-edge', topLeft, topRight, about),
-  ];
-  for (const edge of edges) {
-    put(draught, 'above', edge);
-    draught.places.blockPath(edge);
-  }
-}
-
 /** Hatching at a support grows coarser rather than denser when the screen is near. */
 const MOST_STROKES = 40;
 
-/** A level line with two zigzags: the wall goes on beyond the paper. */
-function breakLine(from: Point, to: Point, mm: (millimetres: number) => number): PathItem {
-  const points: [Point, ...Point[]] = [from];
-  for (const share of [0.25, 0.75]) {
-    const x = from.x + share * (to.x - from.x);
-    points.push({ x: x - mm(1.5), y: from.y }, { x: x - mm(0.5), y: from.y + mm(2) });
-    points.push({ x: x + mm(0.5), y: from.y - mm(2) }, { x: x + mm(1.5), y: from.y });
-  }
-  return polyline('above-edge', [...points, to]);
-}
-
 /** Each springing joint as a firm line with the ground's hatching behind it, and the chain line between the springings. */
-function drawSupports(draught: Draught): void {
-  const { ring, mm, places } = draught;
-  const left = ring.joints[0]!;
-  const right = ring.joints.at(-1)!;
+export function drawSupports(draught: Draught, left: Joint, right: Joint): void {
+  const { mm, places } = draught;
   for (const [side, { intrados, extrados }] of [
     ['left', left],
     ['right', right],

@@ -5,10 +5,13 @@
 import type { AssessedScheme } from '../assess/assess.ts';
 import { AT_REST, placed, placedPath, type Placement } from '../geometry/placement.ts';
 import { distance, midpoint, type Point } from '../geometry/point.ts';
-import type { Joint, Outline } from '../geometry/ring.ts';
+import type { Outline } from '../geometry/ring-blocks.ts';
+import type { Joint } from '../geometry/stations.ts';
+import type { CrackPattern } from '../statics/crack-pattern.ts';
 import type { Side } from '../statics/hinge.ts';
 import { motionsOf, type Motion } from '../statics/mechanism.ts';
 import type { SpreadPlace } from '../statics/remaining-spread.ts';
+import type { TurningHinge } from '../statics/thrust.ts';
 import { placementsOf } from './linkage.ts';
 
 /** A joint that gapes: the faces of the parts at its two sides stand apart at the face opposite `side`. */
@@ -39,13 +42,24 @@ export interface MovedRing {
  * @param movement small motions of the left support, the blocks and the right support, as `motionsOf` gives them and
  * drawn `factor` times as large, or a place of the remaining spread, which is drawn as it is.
  */
-export function movedRing(
-  assessed: AssessedScheme,
-  movement: readonly Motion[] | SpreadPlace,
-  factor = 1,
-): MovedRing {
+export function movedRing(assessed: AssessedScheme, movement: readonly Motion[] | SpreadPlace, factor = 1): MovedRing {
   if ('placements' in movement) return standing(assessed, movement.placements, 1);
   return standing(assessed, placementsOf(assessed.built.joints, movement, factor), factor);
+}
+
+/**
+ * Small motions of the supports and blocks from the joints that open, as `motionsOf` has them, with the support at rest
+ * that did not move.
+ */
+export function motionsOfOpenings(
+  { built }: AssessedScheme,
+  openings: readonly TurningHinge[],
+  movedSide: 'left' | 'right' = 'left',
+): Motion[] {
+  const motions = motionsOf(built.joints, openings);
+  if (movedSide === 'left') return motions;
+  const { turn, dx, dy } = motions[0]!;
+  return motions.map((motion) => ({ turn: motion.turn - turn, dx: motion.dx - dx, dy: motion.dy - dy }));
 }
 
 /** Of the ring's thickness: how far the furthest point goes in the last frame. */
@@ -58,11 +72,23 @@ const LARGEST_TURN = 0.3;
  * Null where it stands, or nothing of it moves.
  */
 export function mechanismFrame(assessed: AssessedScheme, t: number): MovedRing | null {
-  const hinges = assessed.result.mechanism?.hinges ?? [];
+  return frameOf(assessed, motionsOfOpenings(assessed, assessed.result.mechanism?.hinges ?? []), t);
+}
+
+/** The same for a movement that may have cracked the ring; its openings are to scale with each other only. */
+export function patternFrame(assessed: AssessedScheme, pattern: CrackPattern, t: number): MovedRing | null {
+  const openings = pattern.openings.map(({ joint, side, opens }) => ({ joint, side, rotation: opens }));
+  return frameOf(
+    assessed,
+    motionsOfOpenings(assessed, openings, pattern.kind.startsWith('right-') ? 'right' : 'left'),
+    t,
+  );
+}
+
+function frameOf(assessed: AssessedScheme, motions: readonly Motion[], t: number): MovedRing | null {
   const { joints } = assessed.built;
-  const motions = motionsOf(joints, hinges);
   const factor = factorFor(joints, motions, LAST_FRAME * thinnestJoint(assessed.ring.joints), LARGEST_TURN);
-  if (hinges.length === 0 || factor === null) return null;
+  if (factor === null) return null;
   return standing(assessed, placementsOf(joints, motions, Math.min(1, Math.max(0, t)) * factor), null);
 }
 
@@ -97,7 +123,9 @@ function standing({ ring, built }: AssessedScheme, placements: readonly Placemen
   const size = distance(ring.joints[0]!.intrados, ring.joints.at(-1)!.intrados);
   const openings = ring.joints.flatMap((joint, j): MovedOpening[] => {
     const found = openingAt(joint, built.joints[j]!, at(j), at(j + 1), size * CLOSED);
-    return found === null ? [] : [{ ...found, joint: j, width: factor === null || factor === 0 ? null : found.width / factor }];
+    return found === null
+      ? []
+      : [{ ...found, joint: j, width: factor === null || factor === 0 ? null : found.width / factor }];
   });
   const outlines = ring.blocks.map((_, block) => placedPath(at(block + 1), ring.outline(block)));
   return { outlines, placements, joints, openings, factor };
@@ -122,7 +150,9 @@ function openingAt(ring: Joint, bearing: Joint, left: Placement, right: Placemen
   const lip = outerEnd(ring, bearing, other);
   const lips: [Point, Point] = [placed(left, lip), placed(right, lip)];
   const width = distance(...lips);
-  return width <= closed ? null : { side, contact: midpoint(placed(left, contact), placed(right, contact)), lips, width };
+  return width <= closed
+    ? null
+    : { side, contact: midpoint(placed(left, contact), placed(right, contact)), lips, width };
 }
 
 /** Of the ring's joint and its bearing part, which may end short of the face or run on into backing: the end further out. */

@@ -1,9 +1,10 @@
 /** Quiet lettering on the elevation: joint numbers and what the wall or fill is. Left out where there is no room. */
+import { drawnLayers } from './above.ts';
 import { hingedJoints, put, type Draught } from './draught.ts';
 import { entered } from './entered.ts';
 import { along, lettering } from './path.ts';
 import type { Placing } from './places.ts';
-import { CAPITAL_HEIGHT, textWidth } from './text.ts';
+import { CAPITAL_HEIGHT, cutToWidth, plainText, textWidth } from './text.ts';
 
 /** Paper mm. */
 const LETTERS = 1.8;
@@ -11,7 +12,9 @@ const FROM_FACE = 2.4;
 
 export function drawNotes(draught: Draught): void {
   drawBreadth(draught);
+  drawLayerNames(draught);
   drawAboveNote(draught);
+  drawBackingNote(draught);
   drawJointNumbers(draught);
 }
 
@@ -31,9 +34,11 @@ function drawBreadth(draught: Draught): void {
 
 function drawAboveNote(draught: Draught): void {
   const { resolved, sky, top, mm, places } = draught;
-  const { kind, unitWeight } = resolved.above;
+  const { kind, unitWeight, openings } = resolved.above;
   if (kind === 'none') return;
-  const words = `${kind} above, ${entered(unitWeight)} kN/m³`;
+  const hidden = openings.filter(({ sill }) => sill >= top.level).length;
+  const higher = hidden === 0 ? '' : `, ${hidden} ${hidden === 1 ? 'opening' : 'openings'} higher up`;
+  const words = `${kind} above, ${entered(unitWeight)} kN/m³${higher}`;
   const width = mm(textWidth(words, 2.5) + 4);
   if (width > sky.right.x - sky.left.x) return;
   const placings: Placing[] = [];
@@ -45,17 +50,60 @@ function drawAboveNote(draught: Draught): void {
   put(draught, 'notes', ...(places.place(placings) ?? []));
 }
 
+/** Each layer's name and thickness inside it, or beside its end; left out where neither has room. */
+function drawLayerNames(draught: Draught): void {
+  const { resolved, sky, mm, places, length } = draught;
+  if (resolved.above.kind === 'none') return;
+  for (const { index, bottom, top } of drawnLayers(draught)) {
+    const { name, thickness } = resolved.above.layers[index]!;
+    const words = `${cutToWidth(plainText(name ?? 'layer'), LONGEST_LAYER_NAME, LETTERS)} ${length(thickness)}`;
+    const about = { kind: 'field', path: `above.layers[${index}].thickness` } as const;
+    const y = (bottom + top) / 2 - mm(LETTERS / 2);
+    const how = { height: LETTERS, role: 'text-quiet', about } as const;
+    put(
+      draught,
+      'notes',
+      ...(places.place([
+        [lettering(words, { x: sky.left.x + mm(2), y }, how)],
+        [lettering(words, { x: sky.right.x - mm(2), y }, { ...how, align: 'end' })],
+        [lettering(words, { x: sky.right.x + mm(1.5), y }, how)],
+        [lettering(words, { x: sky.left.x - mm(1.5), y }, { ...how, align: 'end' })],
+      ]) ?? []),
+    );
+  }
+}
+
+/** Paper mm. */
+const LONGEST_LAYER_NAME = 50;
+
+/** What the backing is taken for, beside it or over it. */
+function drawBackingNote(draught: Draught): void {
+  const { resolved, sky, mm, places } = draught;
+  const { backing } = resolved;
+  if (backing === null) return;
+  const words = `backing, ${backing.counts === 'masonry' ? 'counted as masonry' : 'weight only'}`;
+  const placings = [0, 4, -4, 8].flatMap((up): Placing[] => {
+    const y = backing.level + mm(up - LETTERS / 2);
+    const how = { height: LETTERS, role: 'text-quiet', about: { kind: 'field', path: 'backing.level' } } as const;
+    return [
+      [lettering(words, { x: sky.left.x - mm(2), y }, { ...how, align: 'end' })],
+      [lettering(words, { x: sky.right.x + mm(2), y }, how)],
+    ];
+  });
+  put(draught, 'notes', ...(places.place(placings) ?? []));
+}
+
 /** Numbers at the springings, at the hinges, and at every fifth or tenth joint; inside the opening first. */
 function drawJointNumbers(draught: Draught): void {
-  const { ring, joints, mm, places } = draught;
-  const last = ring.joints.length - 1;
+  const { standing, joints, mm, places } = draught;
+  const last = standing.length - 1;
   const every = last <= 12 ? 1 : last <= 40 ? 5 : 10 ** Math.ceil(Math.log10(last / 40));
   const hinges = hingedJoints(draught);
   const wanted = joints.filter((joint) => joint === 0 || joint === last || joint % every === 0 || hinges.has(joint));
   // Hinges first: theirs are the numbers that the findings speak of.
   const ordered = [...wanted.filter((joint) => hinges.has(joint)), ...wanted.filter((joint) => !hinges.has(joint))];
   for (const joint of ordered) {
-    const { intrados, extrados } = ring.joints[joint]!;
+    const { intrados, extrados } = standing[joint]!;
     const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
     const number = (centre: { x: number; y: number }): Placing => [
       lettering(

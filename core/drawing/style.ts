@@ -103,6 +103,7 @@ export const STYLES = {
   'backing-masonry': { fill: 'stone1' },
   'backing-bond': { pen: 0.18, stroke: 'stone3' },
   'joint-onward': { pen: 0.18, stroke: 'ink', dash: [1, 0.8] },
+  'moved-stone': { pen: 0.18, stroke: 'ink', fill: 'stone1' },
   course: { pen: 0.13, stroke: 'stone3' },
   'lost-mortar': { pen: 0.18, stroke: 'ink', fill: 'sheet' },
   support: { pen: 0.5, stroke: 'ink' },

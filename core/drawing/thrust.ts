@@ -1,10 +1,11 @@
 /** Lines of thrust, the band between them, and the hinges that they make. */
-import type { Hinge, LinePoint, ThrustState } from '../assess/assessment.ts';
+import type { LinePoint, ThrustState } from '../assess/assessment.ts';
 import type { Point } from '../geometry/point.ts';
 import { put, type Draught } from './draught.ts';
 import { hatchLines } from './hatch.ts';
-import { circle, along, polygon, polyline, stroke } from './path.ts';
-import type { About, PathItem } from './scene.ts';
+import { drawHinge } from './hinges.ts';
+import { polygon, polyline, stroke } from './path.ts';
+import type { About } from './scene.ts';
 
 export type StateName = 'least' | 'greatest';
 
@@ -32,11 +33,11 @@ function pointsAt({ joints }: Draught, state: ThrustState): LinePoint[] {
 }
 
 /** Stretches without a gap; the line has a gap where the resultant runs along a joint. */
-function unbroken(line: readonly LinePoint[]): [Point, ...Point[]][] {
+export function unbroken(line: readonly (LinePoint | null)[]): [Point, ...Point[]][] {
   const runs: [Point, ...Point[]][] = [];
   let open = false;
   for (const point of line) {
-    if (point.x === null) {
+    if (point === null || point.x === null) {
       open = false;
     } else if (open) {
       runs.at(-1)!.push(point);
@@ -74,29 +75,3 @@ const HATCH_ANGLE = Math.PI / 4;
 /** Paper mm. */
 const HATCH_GAP = 1.5;
 const MOST_HATCH_LINES = 250;
-
-/** Width of a hinge's opening where the movement is not known: this share of the joint, within these paper mm. */
-const OPENING = { share: 0.16, least: 0.9, most: 2.4 } as const;
-/** Radius of the contact, paper mm. */
-const CONTACT = 0.6;
-
-type HingeRole = 'hinge-least' | 'hinge-greatest' | 'hinge-mechanism';
-
-/** The joint as it opens: a thin wedge from the face in contact to the face that opens, and a dot at the contact. */
-export function drawHinge(draught: Draught, hinge: Hinge, role: HingeRole, about: About): PathItem[] {
-  const joint = draught.ring.joints[hinge.joint];
-  if (joint === undefined) return [];
-  const contact = joint[hinge.side];
-  const opening = joint[hinge.side === 'extrados' ? 'intrados' : 'extrados'];
-  const length = Math.hypot(opening.x - contact.x, opening.y - contact.y);
-  const across = Math.atan2(opening.y - contact.y, opening.x - contact.x);
-  const { mm } = draught;
-  const half = Math.min(mm(OPENING.most), Math.max(mm(OPENING.least), OPENING.share * length)) / 2;
-  const corners: [Point, Point, Point] = [
-    contact,
-    along(contact, across, length, half),
-    along(contact, across, length, -half),
-  ];
-  draught.places.block(corners);
-  return [polygon(role, corners, about), circle(role, contact, mm(CONTACT), about)];
-}
