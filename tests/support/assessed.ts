@@ -1,5 +1,7 @@
 import { assessScheme } from '../../core/assess/assess.ts';
 import type { SchemeAssessment } from '../../core/assess/assessment.ts';
+import { buildScheme, type BuiltScheme } from '../../core/assess/build.ts';
+import { resolveScheme } from '../../core/job/defaults.ts';
 import type { Problem } from '../../core/job/problem.ts';
 import type { Scheme } from '../../core/job/schema.ts';
 
@@ -21,4 +23,9 @@ export function problemsWith(draft: SchemeDraft): readonly Problem[] {
   const scheme = schemeFrom(draft);
   const outcome = assessScheme({ id: 'a1', schemes: [scheme] }, scheme);
   return outcome.ok ? [] : outcome.problems;
+}
+
+/** The same, with what was built to assess it. */
+export function builtFrom(draft: SchemeDraft): BuiltScheme {
+  return buildScheme(resolveScheme(schemeFrom(draft)).resolved);
 }

@@ -142,6 +142,22 @@ describe('crushing', () => {
     expect(holds).toBeGreaterThan(100);
   });
 
+  test('the strength that the ring needs is the least with which equilibrium is possible', () => {
+    let asked = 0;
+    for (const one of cases()) {
+      const { demand } = one.result.checks.find(({ id }) => id === 'ring.crushing') ?? {};
+      if (demand === null || demand === undefined) continue;
+      asked++;
+      const possible = (strength: number): boolean => {
+        const { programme, lengths, p } = prepared({ ...one, friction: null, strength });
+        return extremeUncrushed(programme, lengths, p, 1).kind === 'optimal';
+      };
+      expect(possible(demand * (1 + 1e-5)), JSON.stringify(one.scheme)).toBe(true);
+      expect(possible(demand * (1 - 1e-5)), JSON.stringify(one.scheme)).toBe(false);
+    }
+    expect(asked).toBeGreaterThan(200);
+  });
+
   test('a fine polygon outside the curve gives a little more room, one inside a little less', () => {
     let asked = 0;
     for (const one of cases().slice(0, 90)) {
