@@ -49,6 +49,7 @@ export function axleEnvelope(
   progress: Progress,
   instead?: string,
 ): AxleEnvelope | null {
+  const { force, patch, dispersal } = axle;
   const { ring, joints, resolved } = built;
   const blocks = instead === undefined ? built.blocks : withoutForces(built.blocks, instead);
   const system = instead === undefined ? built.system : ringSystem(joints, blocks);
@@ -60,7 +61,7 @@ export function axleEnvelope(
     if (!progress(i / steps)) return null;
     const x = sky.left.x + ((sky.right.x - sky.left.x) * (i + 0.5)) / steps;
     const forces: BlockForces = blocks.map(() => []);
-    addLoad(forces, ground, { id: 'axle', name: 'axle', action: 'variable', kind: 'axle', x, ...axle });
+    addLoad(forces, ground, { id: 'axle', name: 'axle', action: 'variable', kind: 'axle', x, force, patch, dispersal });
     const set = sumsOf(
       system.frame,
       forces.map((block) => ({ forces: block })),
