@@ -101,15 +101,8 @@ export function takeOutOpenings(
         },
       ];
     }
-    for (const block of sky.open) {
-      const face = sky.faces[block];
-      if (!face) continue;
-      const a = Math.max(from, face.from.x);
-      const b = Math.min(to, face.to.x);
-      if (!(a < b)) continue;
-      const weight = (b - a) * (head - sill) * unitWeight * breadth;
-      forces[block]?.push({ x: (a + b) / 2, y: (sill + head) / 2, fx: 0, fy: weight, from: ABOVE });
-    }
+    const perMetre = (head - sill) * unitWeight * breadth;
+    addEvenly(forces, sky, from, to, -perMetre, ABOVE, (sill + head) / 2);
     return [];
   });
 }
