@@ -34,6 +34,15 @@ export function persistentRival(rows: Rows): PersistentRival {
 
 export const rivalBuiltAnew = (rows: Rows): Range => solvedAnew(modelOf(rows), [0], [1]);
 
+/** The least of one cost over rows built anew; null where there is none. */
+export function leastBuiltAnew(rows: Rows, cost: readonly number[]): number | null {
+  return highs.withModel({ ...modelOf(rows), colCost: Float64Array.from(cost) }, (model) => {
+    model.options.set({ output_flag: false });
+    model.run();
+    return model.getModelStatus() === optimal ? model.getObjectiveValue() : null;
+  });
+}
+
 /** The same two questions of the whole block programme. */
 export function blockRivalBuiltAnew(model: PrintedModel): Range {
   const programme = new EquilibriumProgramme(model);
@@ -50,6 +59,16 @@ function solvedAnew(data: ModelData, columns: readonly number[], costs: readonly
     model.options.set({ output_flag: false });
     return bothEnds(model, columns, costs);
   });
+}
+
+/** Rows of one kind and then of another. */
+export function joined(first: Rows, second: Rows): Rows {
+  return {
+    unknowns: first.unknowns,
+    count: first.count + second.count,
+    a: Float64Array.from([...first.a, ...second.a]),
+    b: Float64Array.from([...first.b, ...second.b]),
+  };
 }
 
 type Model = Pick<

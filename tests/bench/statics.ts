@@ -1,100 +1,113 @@
 /**
- * What the statics cost on this machine: each question on rings of sixty blocks, the thrust against HiGHS on the same
- * rings in the same run, and the growth with the number of joints. Medians; nothing here fails for being slow.
+ * What the statics cost on this machine: each question on rings of sixty blocks, beside HiGHS on the same rings in the
+ * same run where it can answer, and the growth with the number of joints. Medians; nothing here fails for being slow.
  */
-import { assessScheme } from '../../core/assess/assess.ts';
-import { buildRing } from '../../core/geometry/ring.ts';
-import { resolveScheme } from '../../core/job/defaults.ts';
-import type { Profile, Scheme } from '../../core/job/schema.ts';
-import type { Block } from '../../core/loading/forces.ts';
-import { loadRing } from '../../core/loading/load-ring.ts';
+import { combinationAnswers, movementPatterns } from '../../core/assess/further.ts';
+import { axleEnvelope, spreadLeft } from '../../core/assess/long-questions.ts';
+import { loadFactors, swayCapacity } from '../../core/assess/multiples.ts';
 import { leastMiddleShare } from '../../core/statics/geometric-safety.ts';
-import { lineRows } from '../../core/statics/rows.ts';
+import { greatestMultiplier } from '../../core/statics/multiplier.ts';
+import { neededStrength } from '../../core/statics/needed-strength.ts';
+import { lineRows, lineRowsWith } from '../../core/statics/rows.ts';
+import { neededFriction, slidingRows } from '../../core/statics/sliding.ts';
+import { answerToMovement } from '../../core/statics/support-movement.ts';
 import { ringSystem, type RingSystem } from '../../core/statics/system.ts';
 import { thrustRange } from '../../core/statics/thrust.ts';
-import type { PrintedModel } from '../validation/equilibrium-programme.ts';
-import { blockRivalBuiltAnew, persistentRival, rivalBuiltAnew } from './rival.ts';
+import { usableThrust } from '../../core/statics/usable-thrust.ts';
+import { blockRivalBuiltAnew, joined, leastBuiltAnew, persistentRival, rivalBuiltAnew } from './rival.ts';
+import { assess, benchScheme, BLOCKS, built, subjects as benchSubjects, type Subject } from './subjects.ts';
 import { medianOfFew, medianTime, table, timeInWords } from './timing.ts';
 
-const BLOCKS = 60;
+interface Question {
+  readonly name: string;
+  readonly run: (subject: Subject) => unknown;
+  readonly asked?: string;
+  /** The same question put to HiGHS: the same rows, its model built anew. */
+  readonly rival?: (subject: Subject) => unknown;
+  /** Too slow for hundreds of runs. */
+  readonly slow?: true;
+}
 
-const PROFILES: readonly Profile[] = [
-  { shape: 'semicircular', span: 4 },
-  { shape: 'segmental', span: 4, rise: 1 },
-  { shape: 'pointed', span: 4, rise: 2.8 },
-  { shape: 'three-centred', span: 4, rise: 1.4 },
-  { shape: 'elliptical', span: 4, rise: 1.4 },
-  { shape: 'parabolic', span: 4, rise: 1.6 },
-  { shape: 'catenary', span: 4, rise: 1.6 },
+/** The ring's figures made anew, as a drag makes them: rows and forms are kept once made, and would cost nothing here. */
+const anew = ({ built: { joints, blocks } }: Subject): RingSystem => ringSystem(joints, blocks);
+
+const yes = (): boolean => true;
+const FRICTION = { friction: 0.6, strength: null, breadth: 0.6 };
+
+const QUESTIONS: readonly Question[] = [
+  { name: 'full assessment', run: ({ scheme }) => assess(scheme), asked: 'under 1 ms' },
+  { name: '  ring and loads alone', run: ({ scheme }) => built(scheme) },
+  {
+    name: 'least and greatest thrust',
+    run: (subject) => thrustRange(anew(subject)),
+    asked: 'under 0.1 ms',
+    rival: (subject) => rivalBuiltAnew(lineRows(anew(subject))),
+  },
+  { name: 'geometric safety', run: (subject) => leastMiddleShare(anew(subject)) },
+  {
+    name: 'load factor of one load',
+    run: ({ firstLoad: { rest, set } }) => greatestMultiplier(rest, set),
+    rival: ({ firstLoad: { rest, set } }) => leastBuiltAnew(lineRowsWith(rest, [set]), [0, 0, 0, -1]),
+  },
+  { name: '  of all loads', run: (subject) => loadFactors(subject.built) },
+  {
+    name: 'sideways capacity, one way',
+    run: ({ sway: { rest, set } }) => greatestMultiplier(rest, set),
+    rival: ({ sway: { rest, set } }) => leastBuiltAnew(lineRowsWith(rest, [set]), [0, 0, 0, -1]),
+  },
+  { name: '  both ways', run: (subject) => swayCapacity(subject.built) },
+  {
+    name: 'usable thrust, friction',
+    run: (subject) => usableThrust(anew(subject), FRICTION),
+    rival: (subject) => {
+      const system = anew(subject);
+      return rivalBuiltAnew(joined(lineRows(system), slidingRows(system, 0.6)));
+    },
+  },
+  {
+    name: 'usable thrust, friction and strength',
+    run: (subject) => usableThrust(anew(subject), { ...FRICTION, strength: 5.8 }),
+  },
+  { name: 'friction needed', run: (subject) => neededFriction(anew(subject)) },
+  {
+    name: 'strength needed',
+    run: (subject) => subject.middle.state && neededStrength(anew(subject), subject.middle.state, 0.6),
+  },
+  {
+    name: 'answer to a support movement',
+    run: (subject) =>
+      answerToMovement(anew(subject), subject.built.joints, { side: 'left', dx: -1, dy: -0.5, turn: 0.1 }),
+    rival: (subject) => leastBuiltAnew(lineRows(anew(subject)), [1, 0.5, -0.1]),
+  },
+  { name: 'patterns of all movements', run: (subject) => movementPatterns(subject.built) },
+  { name: 'one combination', run: (subject) => combinationAnswers(subject.built) },
+  {
+    name: 'envelope of 200 axle places',
+    run: (subject) => axleEnvelope(subject.built, { force: 60, patch: 0.3, dispersal: 0.5 }, 200, yes),
+    asked: 'under 100 ms',
+    slow: true,
+  },
+  {
+    name: 'remaining spread',
+    run: (subject) => spreadLeft(subject.built, { x: -1, y: 0 }, 2, yes),
+    asked: 'under 50 ms',
+    slow: true,
+  },
 ];
 
-const schemeOf = (profile: Profile, voussoirs = BLOCKS): Scheme => ({
-  id: 's1',
-  profile,
-  ring: { thickness: 0.45, voussoirs, joints: 'radial' },
-  breadth: 0.6,
-  masonry: { unitWeight: 22, strength: 5.8, friction: 0.6 },
-  above: { kind: 'wall', height: 0.6, unitWeight: 20 },
-  loads: [
-    { id: 'l1', kind: 'point', x: 0.4, force: 8 },
-    { id: 'l2', kind: 'strip', from: -1, to: 0.5, intensity: 6 },
-  ],
-});
-
-interface Subject {
-  readonly scheme: Scheme;
-  readonly model: PrintedModel;
-  readonly system: RingSystem;
-  /** The same ring under half as much again of its first load. */
-  readonly heavier: RingSystem;
-}
-
-function subjectOf(profile: Profile): Subject {
-  const scheme = schemeOf(profile);
-  const { ring, blocks } = built(scheme);
-  const system = ringSystem(ring.joints, blocks);
-  const heavier = blocks.map((block): Block => ({
-    forces: block.forces.map((force) => (force.from === 'l1' ? { ...force, fy: force.fy * 1.5 } : force)),
-  }));
-  const subject = { scheme, model: { joints: ring.joints, blocks }, system, heavier: ringSystem(ring.joints, heavier) };
-  if (!thrustRange(subject.system).stands || !thrustRange(subject.heavier).stands) {
-    throw new Error(`the ${profile.shape} ring of the bench does not stand`);
-  }
-  return subject;
-}
-
-function built(scheme: Scheme) {
-  const { resolved } = resolveScheme(scheme);
-  const ring = buildRing({
-    profile: resolved.profile,
-    thickness: { crown: resolved.ring.thickness, springing: resolved.ring.thickness },
-    voussoirs: resolved.ring.voussoirs,
-    joints: resolved.ring.joints,
-  });
-  return { ring, blocks: loadRing(ring, resolved) };
-}
-
-function assess(scheme: Scheme): void {
-  const outcome = assessScheme({ id: 'a1', schemes: [scheme] }, scheme);
-  if (!outcome.ok) throw new Error('a ring of the bench was refused');
-}
-
 function questions(subjects: readonly Subject[]): void {
-  const rows: [string, number, string][] = [
-    ['full assessment', medianTime(subjects, ({ scheme }) => assess(scheme)), 'under 1 ms'],
-    ['  ring and loads alone', medianTime(subjects, ({ scheme }) => built(scheme)), ''],
-    ['least and greatest thrust', medianTime(subjects, ({ system }) => thrustRange(system)), 'under 0.1 ms'],
-    ['geometric safety', medianTime(subjects, ({ system }) => leastMiddleShare(system)), ''],
-  ];
+  const rows = QUESTIONS.map(({ name, run, asked, rival, slow }) => {
+    const time = slow ? medianOfFew(() => subjects.map(run)) / subjects.length : medianTime(subjects, run);
+    const ratio = rival ? (medianTime(subjects, rival) / time).toFixed(0) : '';
+    return [name, timeInWords(time), asked ?? '', ratio];
+  });
   console.log(`\nStatics, rings of ${BLOCKS} blocks (${subjects.length} shapes, two loads, wall above)`);
-  console.log(
-    table([['question', 'median', 'asked for'], ...rows.map(([name, us, asked]) => [name, timeInWords(us), asked])]),
-  );
+  console.log(table([['question', 'median', 'asked for', 'HiGHS over ours'], ...rows]));
 }
 
 function againstHighs(subjects: readonly Subject[]): void {
-  const own = medianTime(subjects, ({ system }) => thrustRange(system));
-  const rivals = subjects.map(({ system, heavier }) => {
+  const own = medianTime(subjects, (subject) => thrustRange(anew(subject)));
+  const rivals = subjects.map(({ built: { system }, heavier }) => {
     const rows = lineRows(system);
     return { rival: persistentRival(rows), limits: [rows.b, lineRows(heavier).b] as const, system, heavier };
   });
@@ -102,20 +115,21 @@ function againstHighs(subjects: readonly Subject[]): void {
     expectAgreement(rival.range(limits[1]), heavier);
     expectAgreement(rival.range(limits[0]), system);
   }
-  for (const { model, system } of subjects) expectAgreement(blockRivalBuiltAnew(model), system);
+  for (const { built: model } of subjects) expectAgreement(blockRivalBuiltAnew(model), model.system);
   let turn = 0;
   const persistent = medianTime(rivals, ({ rival, limits }) => rival.range(limits[turn++ % 2 === 0 ? 0 : 1]));
   for (const { rival } of rivals) rival.dispose();
-  const anew = medianTime(subjects, ({ system }) => rivalBuiltAnew(lineRows(system)));
-  const blocks = medianTime(subjects, ({ model }) => blockRivalBuiltAnew(model));
+  const threeUnknowns = medianTime(subjects, (subject) => rivalBuiltAnew(lineRows(anew(subject))));
+  const blocks = medianTime(subjects, (subject) => blockRivalBuiltAnew(subject.built));
+  const row = (name: string, time: number): string[] => [name, timeInWords(time), (time / own).toFixed(0)];
   console.log('\nLeast and greatest thrust against HiGHS, the same rings in the same run');
   console.log(
     table([
       ['method', 'median', 'over ours'],
-      ['hinge simplex', timeInWords(own), '1'],
-      ['HiGHS, three unknowns kept alive, only bounds changed', timeInWords(persistent), (persistent / own).toFixed(0)],
-      ['HiGHS, three unknowns, built anew from typed arrays', timeInWords(anew), (anew / own).toFixed(0)],
-      ['HiGHS, every block and joint, built anew', timeInWords(blocks), (blocks / own).toFixed(0)],
+      row('hinge simplex', own),
+      row('HiGHS, three unknowns kept alive, only bounds changed', persistent),
+      row('HiGHS, three unknowns, built anew from typed arrays', threeUnknowns),
+      row('HiGHS, every block and joint, built anew', blocks),
     ]),
   );
 }
@@ -134,11 +148,10 @@ function expectAgreement(range: readonly [number | null, number | null], system:
 
 function growth(): void {
   const rows = [1e2, 1e3, 1e4, 1e5].map((joints) => {
-    const scheme = schemeOf({ shape: 'segmental', span: 4, rise: 1 }, joints - 1);
-    const { ring, blocks } = built(scheme);
-    const system = ringSystem(ring.joints, blocks);
-    const runs = joints > 1e4 ? 3 : 9;
-    const thrust = medianOfFew(() => thrustRange(system), runs);
+    const scheme = benchScheme({ shape: 'segmental', span: 4, rise: 1 }, joints - 1);
+    const { joints: places, blocks } = built(scheme);
+    const runs = Math.max(3, Math.min(99, Math.round(2e5 / joints)));
+    const thrust = medianOfFew(() => thrustRange(ringSystem(places, blocks)), runs);
     const whole = medianOfFew(() => assess(scheme), runs);
     const each = (us: number): string => ((us * 1000) / joints).toFixed(0);
     return [String(joints), timeInWords(thrust), each(thrust), timeInWords(whole), each(whole)];
@@ -147,7 +160,7 @@ function growth(): void {
   console.log(table([['joints', 'thrust', 'ns a joint', 'assessment', 'ns a joint'], ...rows]));
 }
 
-const subjects = PROFILES.map(subjectOf);
+const subjects = benchSubjects();
 questions(subjects);
 againstHighs(subjects);
 growth();
