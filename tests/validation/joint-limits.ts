@@ -35,7 +35,7 @@ interface Chord {
 }
 
 /** The tangent at a normal force. */
-export const tangentAt = (normal: number, t: number, p: number): Chord => ({
+const tangentAt = (normal: number, t: number, p: number): Chord => ({
   slope: t / 2 - normal / p,
   start: (normal * normal) / (2 * p),
 });

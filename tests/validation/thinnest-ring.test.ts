@@ -63,6 +63,16 @@ describe('thinnest ring', () => {
     }
   });
 
+  test('a load over a skewback does not stop the search: beside a thinner ring it rests on the support', () => {
+    const { thinnestRing } = assessed({
+      profile: { shape: 'semicircular', span: 4 },
+      ring: { thickness: 0.5, voussoirs: 20, joints: 'radial' },
+      loads: [{ id: 'l1', kind: 'point', x: 2.2, force: 5 }],
+    });
+    expect(thinnestRing).toBeGreaterThan(0.2);
+    expect(thinnestRing).toBeLessThan(0.3);
+  });
+
   test('a flat arch holds a straight line however thin it is', () => {
     const { thinnestRing } = assessed({
       profile: { shape: 'flat', span: 2, skewbackAngle: 60, camber: 0 },
