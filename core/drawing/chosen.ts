@@ -1,6 +1,7 @@
 /** A line of thrust that was chosen or drawn by hand: solid, with each place where it leaves the ring and by how much. */
 import { distance, type Point } from '../geometry/point.ts';
 import type { Side } from '../statics/hinge.ts';
+import { millimetres } from './entered.ts';
 import { put, type Draught } from './draught.ts';
 import { along, circle, lettering, polyline, stroke } from './path.ts';
 import type { Placing } from './places.ts';
@@ -16,20 +17,25 @@ export interface ChosenLine {
 
 const ABOUT: About = { kind: 'thrust', state: 'chosen' };
 
-export function drawChosen(draught: Draught, { line, label }: ChosenLine): void {
-  const { joints, places } = draught;
-  const drawn = new Set(joints);
+/** What was drawn of a chosen line, to be lettered when all other lines are there. */
+export interface DrawnChosen {
+  readonly outside: readonly Excursion[];
+}
+
+export function drawChosen(draught: Draught, { line }: ChosenLine): DrawnChosen {
   const outside = excursions(draught, line);
-  for (const { joint } of outside) drawn.add(joint);
-  const shown = line
-    .map((point, joint) => (drawn.has(joint) ? point : undefined))
-    .filter((point) => point !== undefined);
+  const drawn = new Set([...draught.joints, ...outside.map(({ joint }) => joint)]);
+  const shown = line.filter((_, joint) => drawn.has(joint));
   for (const run of unbroken(shown)) {
     const path = polyline('thrust-chosen', run, ABOUT);
     put(draught, 'thrust-chosen', path);
-    places.blockPath(path);
+    draught.places.blockPath(path);
   }
   for (const place of outside) drawExcursion(draught, place);
+  return { outside };
+}
+
+export function letterChosen(draught: Draught, { line, label }: ChosenLine, { outside }: DrawnChosen): void {
   for (const place of furthest(outside)) letterExcursion(draught, place);
   if (label !== '') letterLine(draught, line, label);
 }
@@ -83,10 +89,10 @@ function furthest(outside: readonly Excursion[]): Excursion[] {
 }
 
 function letterExcursion(draught: Draught, { joint, at, from, by }: Excursion): void {
-  const { mm, places, length } = draught;
+  const { mm, places } = draught;
   const outwards = Math.atan2(at.y - from.y, at.x - from.x);
   const align = Math.cos(outwards) >= 0 ? 'start' : 'end';
-  const text = `${length(by)} m outside`;
+  const text = `${millimetres(by)} outside`;
   const placings = [2, 4, 7].flatMap((away) =>
     [0, 0.6, -0.6, 1.2, -1.2].map((aside): Placing => {
       const { x, y } = along(at, outwards + aside, mm(away));

@@ -6,15 +6,20 @@ import { marksOf } from '../assess/marks.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/stations.ts';
 import type { Crack } from '../job/schema.ts';
-import { figure } from '../quantity/figures.ts';
 import { put, type Draught } from './draught.ts';
+import { millimetres } from './entered.ts';
 import { along, lettering, polyline } from './path.ts';
 import type { Placing } from './places.ts';
 import type { About, PathItem } from './scene.ts';
 import { cutToWidth, plainText, textWidth } from './text.ts';
 
-export function drawCracks(draught: Draught): void {
-  const seen = draught.resolved.cracks.flatMap((crack) => {
+interface DrawnCrack {
+  readonly crack: Crack;
+  readonly joint: Joint;
+}
+
+export function drawCracks(draught: Draught): DrawnCrack[] {
+  const seen = draught.resolved.cracks.flatMap((crack): DrawnCrack[] => {
     const joint = jointOf(draught, crack);
     return joint === null ? [] : [{ crack, joint }];
   });
@@ -24,6 +29,10 @@ export function drawCracks(draught: Draught): void {
       draught.places.blockPath(path);
     }
   }
+  return seen;
+}
+
+export function letterCracks(draught: Draught, seen: readonly DrawnCrack[]): void {
   for (const { crack, joint } of seen) letterCrack(draught, crack, joint);
 }
 
@@ -66,7 +75,7 @@ const LONGEST_DATE = 24;
 
 /** `3 mm, 2026-05-14`; nothing where neither is known. */
 function wordsOf({ width, seenOn }: Crack): string {
-  const measured = width === undefined ? '' : `${figure(width * 1000, 2)} mm`;
+  const measured = width === undefined ? '' : millimetres(width);
   const date = cutToWidth(plainText(seenOn ?? ''), LONGEST_DATE, LETTERS);
   return [measured, date].filter((text) => text !== '').join(', ');
 }

@@ -21,6 +21,7 @@ const LETTERS = 2.5;
 const OVER_LINE = 1.8;
 const SPAN_DROP = 10;
 const RING_TAIL = 14;
+const SPRINGING_DROP = 18;
 
 export function drawDimensions(draught: Draught): void {
   const dimensions: Dimension[] = [];
@@ -31,7 +32,9 @@ export function drawDimensions(draught: Draught): void {
     for (const path of added.paths) draught.places.blockPath(path);
   };
   for (const added of [spanLine(draught), ...riseLine(draught), ...heightLine(draught)]) add(added);
-  add(ringLine(draught));
+  const { thickness, springingThickness } = draught.resolved.ring;
+  if (thickness === springingThickness) add(ringLine(draught));
+  else for (const added of [crownLine(draught), springingLine(draught)]) add(added);
   for (const { label, middle } of dimensions) {
     const placed = draught.places.placeSurely(label, middle);
     put(draught, 'dimensions', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
@@ -141,6 +144,32 @@ function heightLine(draught: Draught): Dimension[] {
   const foot = ring.crownExtrados;
   const head = { x: foot.x, y: top.level };
   return [dimension(draught, foot, head, [foot, head], length(resolved.above.height), aboutField('above.height'))];
+}
+
+/** Across a tapering ring at its crown, in line with rise and height. */
+function crownLine(draught: Draught): Dimension {
+  const { ring, resolved, mm, length } = draught;
+  const { crownIntrados: foot, crownExtrados: head } = ring;
+  const about = aboutField('ring.thickness');
+  const text = `crown ${length(resolved.ring.thickness)}`;
+  const over = head.y + mm(OVER_LINE);
+  const under = foot.y - mm(OVER_LINE + LETTERS);
+  const label = [over, over + mm(4), under, under - mm(4)].flatMap((y): Placing[] => [
+    [lettering(text, { x: head.x + mm(OVER_LINE), y }, { about })],
+    [lettering(text, { x: head.x - mm(OVER_LINE), y }, { about, align: 'end' })],
+  ]);
+  const { paths, middle } = dimension(draught, foot, head, [foot, head], text, about);
+  return { paths, middle, label };
+}
+
+/** Behind the left springing joint, further out than the reaction's arrow. */
+function springingLine(draught: Draught): Dimension {
+  const { ring, resolved, mm, length } = draught;
+  const { intrados, extrados } = ring.joints[0]!;
+  const outwards = Math.atan2(extrados.y - intrados.y, extrados.x - intrados.x);
+  const [a, b] = [intrados, extrados].map((end) => along(end, outwards, 0, mm(SPRINGING_DROP))) as [Point, Point];
+  const text = `springing ${length(resolved.ring.springingThickness)}`;
+  return dimension(draught, a, b, [intrados, extrados], text, aboutField('ring.springingThickness'));
 }
 
 /**

@@ -3,14 +3,14 @@ import type { AssessedScheme } from '../assess/assess.ts';
 import { headline } from '../checks/headline.ts';
 import { metres } from '../quantity/figures.ts';
 import { drawAbove } from './above.ts';
-import { drawChosen, type ChosenLine } from './chosen.ts';
-import { drawCracks } from './cracks.ts';
+import { drawChosen, letterChosen, type ChosenLine } from './chosen.ts';
+import { drawCracks, letterCracks } from './cracks.ts';
 import { drawDimensions } from './dimensions.ts';
 import { beginDraught, type LengthText } from './draught.ts';
 import { drawLoads } from './loads.ts';
 import { drawMasonry } from './masonry.ts';
 import { drawMechanism } from './mechanism.ts';
-import { drawMoved, type MovedPicture } from './moved.ts';
+import { drawMoved, letterMoved, type MovedPicture } from './moved.ts';
 import { drawNotes } from './notes.ts';
 import { drawReactions } from './reactions.ts';
 import { makeScene, type LayerName, type Scene } from './scene.ts';
@@ -52,11 +52,16 @@ export function elevation(assessed: AssessedScheme, options: ElevationOptions): 
   } else {
     drawMoved(draught, moved);
   }
-  if (chosen !== undefined) drawChosen(draught, chosen);
+  const drawnChosen = chosen === undefined ? null : drawChosen(draught, chosen);
   drawLoads(draught);
-  drawCracks(draught);
-  drawDimensions(draught);
+  const cracks = drawCracks(draught);
+  // measures are those of the ring as it was, and would lie across a moved one
+  if (moved === undefined) drawDimensions(draught);
+  // lettering may not lie on lines that are drawn after it
+  letterCracks(draught, cracks);
+  if (chosen !== undefined && drawnChosen !== null) letterChosen(draught, chosen, drawnChosen);
   if (moved === undefined) drawReactions(draught);
+  else letterMoved(draught, moved);
   drawNotes(draught);
   const title = plainText(assessed.result.name);
   return makeScene(

@@ -5,3 +5,9 @@ export function entered(value: number): string {
   const text = figure(value, 6);
   return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
+
+/** A width as it is read off a crack gauge: tenths under a centimetre, whole millimetres over it. */
+export function millimetres(metres: number): string {
+  const value = metres * 1000;
+  return `${entered(Math.abs(value) < 10 ? Math.round(value * 10) / 10 : Math.round(value))} mm`;
+}

@@ -39,18 +39,36 @@ function findings(result: SchemeAssessment, { asked }: ResolvedScheme): Row[] {
   return rows;
 }
 
-function given({ ring, masonry, above, breadth, sway }: ResolvedScheme, length: LengthText): Row[] {
-  const rows: Row[] = [
-    ['Ring', `${entered(ring.voussoirs)} voussoirs, ${ring.joints} joints`],
-    ['Thickness and breadth', `${length(ring.thickness)} and ${length(breadth)} m`],
-    ['Masonry', masonry.name],
-    ['Unit weight', `${entered(masonry.unitWeight)} kN/m³`],
-  ];
+function given({ ring, masonry, above, backing, breadth, sway, cracks }: ResolvedScheme, length: LengthText): Row[] {
+  const { thickness, springingThickness, courses } = ring;
+  const rings = courses > 1 ? `${courses} rings of ` : '';
+  const rows: Row[] = [['Ring', `${rings}${entered(ring.voussoirs)} voussoirs, ${ring.joints} joints`]];
+  if (thickness === springingThickness) {
+    rows.push(['Thickness and breadth', `${length(thickness)} and ${length(breadth)} m`]);
+  } else {
+    rows.push(['Thickness, crown to springing', `${length(thickness)} to ${length(springingThickness)} m`]);
+    rows.push(['Breadth', `${length(breadth)} m`]);
+  }
+  rows.push(['Masonry', masonry.name], ['Unit weight', `${entered(masonry.unitWeight)} kN/m³`]);
   if (above.kind === 'none') rows.push(['Above', 'nothing']);
   else rows.push(['Above', `${above.kind} ${length(above.height)} m, ${entered(above.unitWeight)} kN/m³`]);
+  if (above.kind !== 'none') {
+    for (const layer of above.layers) {
+      rows.push([plainText(layer.name ?? 'layer'), `${length(layer.thickness)} m, ${entered(layer.unitWeight)} kN/m³`]);
+    }
+  }
+  if (above.sidePressure !== 0) rows.push(['Side pressure', `${entered(above.sidePressure)} of the vertical`]);
+  if (backing !== null) {
+    const counts = backing.counts === 'masonry' ? 'as masonry' : 'weight only';
+    rows.push(['Backing', `to ${length(backing.level)} m, ${counts}`]);
+  }
+  if (cracks.length > 0) rows.push(['Openings seen', String(cracks.length)]);
   if (sway !== 0) rows.push(['Sideways', `${entered(sway)} of gravity`]);
-  return rows;
+  return rows.slice(0, MOST_GIVEN);
 }
+
+/** A file may have thousands of layers; the drawing's figures are for the few that matter. */
+const MOST_GIVEN = 16;
 
 const kilonewtons = (value: number): string => `${figure(value)} kN`;
 

@@ -21,8 +21,8 @@ export const columnWidth = (paper: Paper): number => (isSmall(paper) ? 72 : 92);
 const cautionsWidth = (paper: Paper): number =>
   insideFrame(paper).right - insideFrame(paper).left - TITLE_BLOCK.width - 2 * PAD;
 
-const cautionsOf = ({ result }: AssessedScheme) => ({
-  raised: raisedCautions({ ...result, stands: result.thrust.stands }).map(({ text }) => text),
+const cautionsOf = ({ result, resolved }: AssessedScheme) => ({
+  raised: raisedCautions({ ...result, stands: result.thrust.stands, scheme: resolved }).map(({ text }) => text),
   standing: standingCautions,
 });
 

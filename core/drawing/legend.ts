@@ -3,9 +3,10 @@ import type { SchemeAssessment } from '../assess/assessment.ts';
 import type { ResolvedScheme } from '../job/defaults.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Column } from './column.ts';
+import { crackMark } from './cracks.ts';
 import { hatchLines } from './hatch.ts';
-import { arrowhead, circle, lettering, polygon, stroke } from './path.ts';
-import type { Lettering, SceneItem } from './scene.ts';
+import { arrowhead, circle, lettering, polygon, rectangle, stroke } from './path.ts';
+import type { Lettering, PathItem, SceneItem } from './scene.ts';
 import type { Role } from './style.ts';
 
 /** mm */
@@ -42,10 +43,35 @@ export function drawLegend(
   }
 }
 
+/** What is laid over the elevation and wants explaining. */
+export interface LegendOverlays {
+  readonly chosen?: boolean;
+  readonly moved?: boolean;
+}
+
 export function legendEntries(
-  { loads }: ResolvedScheme,
-  { thrust, reactions, mechanism }: SchemeAssessment,
+  resolved: ResolvedScheme,
+  assessment: SchemeAssessment,
+  { chosen = false, moved = false }: LegendOverlays = {},
 ): LegendEntry[] {
+  return [
+    ...(moved ? movedEntries() : stateEntries(assessment)),
+    ...(chosen ? [{ words: 'Chosen line of thrust', swatch: [level('thrust-chosen')] }] : []),
+    ...(chosen ? [{ words: 'Where it leaves the ring', swatch: outside() }] : []),
+    ...schemeEntries(resolved),
+    ...(assessment.reactions && !moved
+      ? [{ words: 'Reaction at least thrust', swatch: pointer('reaction', 'reaction-head', 1.8) }]
+      : []),
+    { words: 'Springing line', swatch: [level('datum')] },
+  ];
+}
+
+const movedEntries = (): LegendEntry[] => [
+  { words: 'Joint that opens, in contact at the dot', swatch: wedge('opening-gap', 'hinge-mechanism') },
+  { words: 'Ring before the movement', swatch: [level('as-it-was')] },
+];
+
+function stateEntries({ thrust, mechanism }: SchemeAssessment): LegendEntry[] {
   const { least, greatest } = thrust;
   const moving = mechanism !== null && mechanism !== undefined && mechanism.hinges.length > 0;
   return [
@@ -56,9 +82,24 @@ export function legendEntries(
     ...(greatest ? [{ words: 'Hinge at greatest thrust', swatch: wedge('hinge-greatest') }] : []),
     ...(moving ? [{ words: 'Hinge of the mechanism', swatch: wedge('hinge-mechanism') }] : []),
     ...(moving ? [{ words: 'First movement, enlarged', swatch: [level('ghost')] }] : []),
+  ];
+}
+
+function schemeEntries({ loads, ring, backing, above, cracks }: ResolvedScheme): LegendEntry[] {
+  const openings = above.kind !== 'none' && above.openings.length > 0;
+  return [
+    ...(cracks.length > 0 ? [{ words: 'Opening seen, at the face that gapes', swatch: crack() }] : []),
+    ...(ring.lostMortar.length > 0 ? [{ words: 'Mortar lost from the joint', swatch: slot() }] : []),
+    ...(backing?.counts === 'weight' ? [{ words: 'Backing, weight only', swatch: block(backingHatch) }] : []),
+    ...(backing?.counts === 'masonry' ? [{ words: 'Backing, counted as masonry', swatch: block(backingBond) }] : []),
+    ...(backing?.counts === 'masonry'
+      ? [{ words: 'Joint taken on through backing', swatch: [level('joint-onward')] }]
+      : []),
+    ...(openings ? [{ words: 'Opening through the wall', swatch: hole() }] : []),
     ...(loads.length > 0 ? [{ words: 'Load', swatch: pointer('load', 'load-head', 3) }] : []),
-    ...(reactions ? [{ words: 'Reaction at least thrust', swatch: pointer('reaction', 'reaction-head', 1.8) }] : []),
-    { words: 'Springing line', swatch: [level('datum')] },
+    ...(loads.some(({ kind }) => kind === 'axle')
+      ? [{ words: 'Spread of an axle load', swatch: [level('load-spread')] }]
+      : []),
   ];
 }
 
@@ -77,16 +118,49 @@ function band(): SceneItem[] {
   return [polygon('thrust-band', figure), ...hatching];
 }
 
-function wedge(role: Role): SceneItem[] {
+function wedge(role: Role, contact: Role = role): SceneItem[] {
   return [
     polygon(role, [
       { x: -4, y: 0 },
       { x: 4, y: 0.9 },
       { x: 4, y: -0.9 },
     ]),
-    circle(role, { x: -4, y: 0 }, 0.6),
+    circle(contact, { x: -4, y: 0 }, 0.6),
   ];
 }
+
+const box = (role: Role): PathItem => rectangle(role, -HALF, -1.7, SWATCH, 3.4);
+
+const block = (fill: (figure: PathItem) => SceneItem[]): SceneItem[] => [...fill(box('backing')), box('swatch-edge')];
+
+const cornersOf = ({ start, edges }: PathItem): Point[] => [start, ...edges.slice(0, -1).map(({ to }) => to)];
+
+const backingHatch = (figure: PathItem): SceneItem[] =>
+  hatchLines(cornersOf(figure), -Math.PI / 4, 2).map(([from, to]) => stroke('backing-hatch', from, to));
+
+const backingBond = (figure: PathItem): SceneItem[] => [
+  { ...figure, role: 'backing-masonry' },
+  stroke('backing-bond', { x: -HALF, y: 0 }, { x: HALF, y: 0 }),
+  ...[-4, 2].map((x) => stroke('backing-bond', { x, y: 0 }, { x, y: 1.7 })),
+  ...[-1, 5].map((x) => stroke('backing-bond', { x, y: -1.7 }, { x, y: 0 })),
+];
+
+const hole = (): SceneItem[] => [
+  rectangle('opening', -3, -1.7, 6, 3.4),
+  stroke('opening-cross', { x: -3, y: -1.7 }, { x: 3, y: 1.7 }),
+  stroke('opening-cross', { x: -3, y: 1.7 }, { x: 3, y: -1.7 }),
+];
+
+const slot = (): SceneItem[] => [level('joint'), rectangle('lost-mortar', -HALF, -0.45, 5, 0.9)];
+
+/** A joint lying level, its gaping face at the left. */
+const crack = (): SceneItem[] =>
+  crackMark({ intrados: { x: -HALF + 2.4, y: 0 }, extrados: { x: HALF, y: 0 } }, 'intrados', (mm) => mm);
+
+const outside = (): SceneItem[] => [
+  stroke('thrust-outside', { x: -2, y: 0 }, { x: 2, y: 0 }),
+  circle('thrust-outside', { x: 2, y: 0 }, 0.9),
+];
 
 const pointer = (shaft: Role, head: Role, slender: number): SceneItem[] => [
   stroke(shaft, { x: -HALF, y: 0 }, { x: HALF - 3, y: 0 }),

@@ -76,7 +76,8 @@ export function drawSupports(draught: Draught, left: Joint, right: Joint): void 
       along(from, outwards, -mm(1.2), behind * mm(1.8)),
     ]);
   }
-  const springing = stroke('datum', left.intrados, right.intrados);
+  const { joints } = draught.ring;
+  const springing = stroke('datum', joints[0]!.intrados, joints.at(-1)!.intrados);
   put(draught, 'springing', springing);
   places.blockPath(springing);
 }

@@ -42,7 +42,11 @@ export interface MovedRing {
  * @param movement small motions of the left support, the blocks and the right support, as `motionsOf` gives them and
  * drawn `factor` times as large, or a place of the remaining spread, which is drawn as it is.
  */
-export function movedRing(assessed: AssessedScheme, movement: readonly Motion[] | SpreadPlace, factor = 1): MovedRing {
+export function movedRing(
+  assessed: AssessedScheme,
+  movement: readonly Motion[] | Pick<SpreadPlace, 'placements'>,
+  factor = 1,
+): MovedRing {
   if ('placements' in movement) return standing(assessed, movement.placements, 1);
   return standing(assessed, placementsOf(assessed.built.joints, movement, factor), factor);
 }
@@ -63,12 +67,12 @@ export function motionsOfOpenings(
 }
 
 /** Of the ring's thickness: how far the furthest point goes in the last frame. */
-const LAST_FRAME = 0.9;
+const LAST_FRAME = 1.5;
 /** Turns beyond this, radians, look like something that has long fallen. */
 const LARGEST_TURN = 0.3;
 
 /**
- * The beginning of the fall of an arch that does not stand: at `t` = 0 as it is, at 1 moved by about its thickness.
+ * The beginning of the fall of an arch that does not stand: at `t` = 0 as it is, at 1 moved by rather more than its thickness.
  * Null where it stands, or nothing of it moves.
  */
 export function mechanismFrame(assessed: AssessedScheme, t: number): MovedRing | null {

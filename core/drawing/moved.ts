@@ -5,8 +5,8 @@
 import { placed } from '../geometry/placement.ts';
 import { midpoint } from '../geometry/point.ts';
 import type { Joint } from '../geometry/stations.ts';
-import { figure } from '../quantity/figures.ts';
 import { put, type Draught } from './draught.ts';
+import { entered, millimetres } from './entered.ts';
 import { bodyOutline } from './faces.ts';
 import { CONTACT } from './hinges.ts';
 import { drawSupports } from './masonry.ts';
@@ -21,7 +21,7 @@ export interface MovedPicture {
   readonly label: string;
 }
 
-export function drawMoved(draught: Draught, { ring: moved, label }: MovedPicture): void {
+export function drawMoved(draught: Draught, { ring: moved }: MovedPicture): void {
   const { ring, places } = draught;
   moved.outlines.forEach((outline, block) => {
     const stone = outlined('moved-stone', outline, { kind: 'block', block });
@@ -31,6 +31,10 @@ export function drawMoved(draught: Draught, { ring: moved, label }: MovedPicture
   for (const opening of moved.openings) drawGap(draught, opening);
   put(draught, 'as-it-was', outlined('as-it-was', bodyOutline(ring, 0, ring.blocks.length)));
   drawSupports(draught, support(draught, 0), support(draught, ring.joints.length - 1));
+}
+
+/** How wide each joint gapes, and how much larger than it is the movement is drawn. */
+export function letterMoved(draught: Draught, { ring: moved, label }: MovedPicture): void {
   for (const opening of moved.openings) letterWidth(draught, opening);
   letterFactor(draught, moved, label);
 }
@@ -60,7 +64,7 @@ function letterWidth(draught: Draught, { joint, contact, lips, width }: MovedOpe
   const { mm, places } = draught;
   const mouth = midpoint(...lips);
   const outwards = Math.atan2(mouth.y - contact.y, mouth.x - contact.x);
-  const text = `${figure(width * 1000, width < 0.01 ? 1 : 2)} mm`;
+  const text = millimetres(width);
   const placings = [4, 6.5, 9].flatMap((away) =>
     [0, 0.7, -0.7].map((aside): Placing => {
       const at = along(mouth, outwards + aside, mm(away));
@@ -84,7 +88,7 @@ function letterFactor(draught: Draught, { factor }: MovedRing, label: string): v
       ? 'not to scale'
       : Math.abs(factor - 1) < 1e-9
         ? 'true size'
-        : `drawn ${figure(factor)} times as large`;
+        : `drawn ${entered(factor)} times as large`;
   const at = { x: ring.crownIntrados.x, y: ring.crownIntrados.y - mm(14) };
   const text = (dy: number): Placing => [
     lettering(

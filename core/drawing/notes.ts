@@ -11,7 +11,7 @@ const LETTERS = 1.8;
 const FROM_FACE = 2.4;
 
 export function drawNotes(draught: Draught): void {
-  drawBreadth(draught);
+  if (draught.moved === null) drawBreadth(draught);
   drawLayerNames(draught);
   drawAboveNote(draught);
   drawBackingNote(draught);

@@ -102,6 +102,7 @@ export const STYLES = {
   'backing-hatch': { pen: 0.13, stroke: 'stone3', dash: [2.4, 1.2] },
   'backing-masonry': { fill: 'stone1' },
   'backing-bond': { pen: 0.18, stroke: 'stone3' },
+  'swatch-edge': { pen: 0.18, stroke: 'stone3' },
   'joint-onward': { pen: 0.18, stroke: 'ink', dash: [1, 0.8] },
   'moved-stone': { pen: 0.18, stroke: 'ink', fill: 'stone1' },
   course: { pen: 0.13, stroke: 'stone3' },

@@ -3,7 +3,8 @@ import type { AssessedScheme } from '../../../core/assess/assess.ts';
 import { spreadLeft } from '../../../core/assess/long-questions.ts';
 import { movement } from '../../../core/assess/questions.ts';
 import { mechanismFrame, movedRing, type MovedRing } from '../../../core/drawing/moved-ring.ts';
-import { placed } from '../../../core/geometry/placement.ts';
+import { placed, turnOf } from '../../../core/geometry/placement.ts';
+import { midpoint } from '../../../core/geometry/point.ts';
 import type { Outline } from '../../../core/geometry/ring-blocks.ts';
 import { motionsOf } from '../../../core/statics/mechanism.ts';
 import type { SupportMovement } from '../../../core/statics/support-movement.ts';
@@ -122,7 +123,7 @@ describe('a place of the remaining spread', () => {
 });
 
 describe('the fall of an arch that does not stand', () => {
-  it('begins where it stands and moves by about its thickness, rigid and closed at every hinge', () => {
+  it('begins where it stands and moves by more than its thickness, rigid and closed at every hinge', () => {
     const arch = thinRing();
     expect(mechanismFrame(arch, 0)?.openings).toEqual([]);
     let furthest = 0;
@@ -140,8 +141,8 @@ describe('the fall of an arch that does not stand', () => {
       expect(moved).toBeGreaterThan(furthest);
       furthest = moved;
     }
-    expect(furthest).toBeGreaterThan(0.05);
-    expect(furthest).toBeLessThan(0.2);
+    expect(furthest).toBeGreaterThan(0.12);
+    expect(furthest).toBeLessThan(0.24);
   });
 
   it('leaves both supports where they are', () => {
