@@ -4,6 +4,7 @@ import './app.css';
 import { host } from './host/host.ts';
 import { NO_PHOTOGRAPHS } from './session/document.ts';
 import { BoardView } from './board/view.svelte.ts';
+import { Questions } from './questions/questions.svelte.ts';
 import { Files } from './session/files.svelte.ts';
 import { firstJob } from './session/samples.ts';
 import { Session } from './session/session.svelte.ts';
@@ -11,7 +12,8 @@ import { theme } from './session/theme.svelte.ts';
 
 theme.start();
 const session = new Session({ job: firstJob(), photographs: NO_PHOTOGRAPHS, file: null });
+const questions = new Questions(session);
 mount(App, {
   target: document.querySelector('#app')!,
-  props: { session, files: new Files(session, host), view: new BoardView(session), host },
+  props: { session, files: new Files(session, host), view: new BoardView(session, questions), questions, host },
 });

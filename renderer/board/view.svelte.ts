@@ -1,5 +1,5 @@
 /** What the board shows of the session: the place on the screen, the drawing at that scale, and what can be taken hold of. */
-import { elevation } from '../../core/drawing/elevation.ts';
+import { elevation, type Overlays } from '../../core/drawing/elevation.ts';
 import type { About, Scene } from '../../core/drawing/scene.ts';
 import type { Theme } from '../../core/drawing/style.ts';
 import { textCorners } from '../../core/drawing/extent.ts';
@@ -30,8 +30,17 @@ export interface Entry {
   readonly at: Point;
 }
 
+/** What is asked of the arch, as far as the board must know it. */
+interface Asked {
+  /** Laid over the elevation to show the answer. */
+  readonly overlays: Overlays;
+  /** Takes a press at a place, m; false leaves it to the board. `reach` in m. */
+  press(at: Point, reach: number): boolean;
+}
+
 export class BoardView {
   readonly #session: Session;
+  readonly #asked: Asked;
   #viewport = $state.raw<Viewport | null>(null);
   /** Height of the legend along the lower edge, px. */
   foot = $state(0);
@@ -43,8 +52,9 @@ export class BoardView {
   /** The handle that is being moved. */
   active = $state.raw<string | null>(null);
 
-  constructor(session: Session) {
+  constructor(session: Session, asked: Asked = NOTHING_ASKED) {
     this.#session = session;
+    this.#asked = asked;
   }
 
   readonly #insets = $derived({ left: MARGIN, top: MARGIN, right: MARGIN, bottom: MARGIN + this.foot });
@@ -52,18 +62,22 @@ export class BoardView {
   readonly #scale: number | null = $derived(this.#viewport === null ? null : millimetresPerMetre(this.#viewport));
   readonly scene: Scene | null = $derived.by(() => {
     const { assessed } = this.#session;
-    return assessed === null || this.#scale === null ? null : elevation(assessed, { millimetresPerMetre: this.#scale });
+    if (assessed === null || this.#scale === null) return null;
+    return elevation(assessed, { millimetresPerMetre: this.#scale, ...this.#asked.overlays });
   });
   readonly handles: readonly Handle[] = $derived.by(() => {
     const { assessed } = this.#session;
-    return assessed === null || this.scene === null ? [] : handlesOf(assessed, this.scene);
+    // measures are taken hold of on the arch as it is, not on a moved one
+    const moved = this.#asked.overlays.moved !== undefined;
+    return assessed === null || this.scene === null || moved ? [] : handlesOf(assessed, this.scene);
   });
   readonly theme: Theme = $derived(boardTheme(theme.dark, theme.forced));
   /** Joints that the selection points at. */
   readonly marked: readonly MarkedJoint[] = $derived.by(() => {
     const { selection, assessed } = this.#session;
     if (selection?.kind !== 'joint') return [];
-    const joint = assessed?.ring.joints[selection.joint];
+    const ring = this.#asked.overlays.moved?.ring ?? assessed?.ring;
+    const joint = ring?.joints[selection.joint];
     return joint === undefined ? [] : [{ number: selection.joint, joint }];
   });
 
@@ -158,7 +172,9 @@ export class BoardView {
   click(pixel: Point, reach: number): void {
     const { scene, viewport } = this;
     if (scene === null || viewport === null) return;
-    const item = itemAt(scene, toMetres(viewport, pixel), reach / 2 / viewport.scale);
+    const at = toMetres(viewport, pixel);
+    if (this.#asked.press(at, reach / viewport.scale)) return;
+    const item = itemAt(scene, at, reach / 2 / viewport.scale);
     const about = item?.about ?? null;
     this.#session.selection = about;
     const measure = item?.kind === 'text' && about !== null ? this.#measureOf(about) : null;
@@ -185,5 +201,7 @@ export class BoardView {
     return load === undefined ? null : (loadMeasures(load)[0] ?? null);
   }
 }
+
+const NOTHING_ASKED: Asked = { overlays: {}, press: () => false };
 
 export const valueText = ({ value }: Handle): string => formatQuantity(value, 'length', SHOWN, { figures: 'exact' });
