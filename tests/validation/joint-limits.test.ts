@@ -1,5 +1,5 @@
 /** Sliding and crushing of random arches against the whole block programme. */
-import { describe, expect, test } from 'vitest';
+import { describe, expect, test, vi } from 'vitest';
 import type { SchemeAssessment } from '../../core/assess/assessment.ts';
 import type { Scheme } from '../../core/job/schema.ts';
 import { assessed } from '../support/assessed.ts';
@@ -7,6 +7,9 @@ import { EquilibriumProgramme, inKilonewtons, leastOf, times, type Optimum } fro
 import { addFriction, addMomentLimit, extremeUncrushed, polygon } from './joint-limits.ts';
 import { randomSchemes } from './random-arches.ts';
 import { totalLoad } from './total-load.ts';
+
+// hundreds of programmes each: seconds at rest, more where the machine is busy
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 120_000 });
 
 const AGREED = 1e-6;
 const EACH = 30;
@@ -26,6 +29,12 @@ const withLimits = (scheme: Scheme, friction: number | null, strength: number | 
   return { scheme: limited, result: assessed(limited), friction, strength };
 };
 
+/** Made when first asked for, and kept. */
+function once<Value>(make: () => Value): () => Value {
+  let made: Value | undefined;
+  return () => (made ??= make());
+}
+
 const lengthsOf = ({ model }: SchemeAssessment): number[] =>
   model.joints.map(({ intrados: i, extrados: e }) => Math.hypot(e.x - i.x, e.y - i.y));
 
@@ -43,8 +52,9 @@ function expectEnd(one: Limited, found: number | null, expected: Optimum, tolera
 }
 
 describe('sliding', () => {
-  const cases = (): Limited[] =>
-    randomSchemes(EACH, 88).map((scheme, i) => withLimits(scheme, FRICTIONS[i % FRICTIONS.length]!, null));
+  const cases = once((): Limited[] =>
+    randomSchemes(EACH, 88).map((scheme, i) => withLimits(scheme, FRICTIONS[i % FRICTIONS.length]!, null)),
+  );
 
   const programmeOf = ({ result }: Limited): EquilibriumProgramme => new EquilibriumProgramme(result.model);
 
@@ -95,7 +105,7 @@ describe('sliding', () => {
 });
 
 describe('crushing', () => {
-  const cases = (): Limited[] =>
+  const cases = once((): Limited[] =>
     randomSchemes(EACH, 90).map((scheme, i) =>
       withLimits(
         {
@@ -105,7 +115,8 @@ describe('crushing', () => {
         i % 3 === 0 ? 0.6 : null,
         STRENGTHS[i % STRENGTHS.length]!,
       ),
-    );
+    ),
+  );
 
   /** The programme, with friction where it is given, the joint lengths in its units, and the force that crushes one. */
   function prepared(one: Limited): { programme: EquilibriumProgramme; lengths: number[]; p: number } {

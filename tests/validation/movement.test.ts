@@ -1,5 +1,5 @@
 /** Movements of the supports: the line that random arches answer with, where they open, and how far they can go. */
-import { describe, expect, test } from 'vitest';
+import { describe, expect, test, vi } from 'vitest';
 import { assessScheme } from '../../core/assess/assess.ts';
 import type { Point } from '../../core/assess/assessment.ts';
 import { jointForce } from '../../core/statics/line.ts';
@@ -17,6 +17,9 @@ import {
 } from './equilibrium-programme.ts';
 import { randomSchemes } from './random-arches.ts';
 import { totalLoad } from './total-load.ts';
+
+// hundreds of programmes each: seconds at rest, more where the machine is busy
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 120_000 });
 
 const AGREED = 1e-6;
 

@@ -1,9 +1,12 @@
 /** Load factors and sideways capacity of random arches against the whole block programme, and against virtual work. */
-import { beforeAll, describe, expect, test } from 'vitest';
+import { beforeAll, describe, expect, test, vi } from 'vitest';
 import type { BlockForce, Hinge, Point, SchemeAssessment } from '../../core/assess/assessment.ts';
 import { assessed } from '../support/assessed.ts';
 import { EquilibriumProgramme, type Optimum, type PrintedModel } from './equilibrium-programme.ts';
 import { randomSchemes } from './random-arches.ts';
+
+// hundreds of programmes each: seconds at rest, more where the machine is busy
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 120_000 });
 
 const AGREED = 1e-6;
 

@@ -2,11 +2,14 @@
  * The thinnest ring of random arches: the ring so thick stands by the block programme, one a millionth thinner does not,
  * and none of a row of thinner ones does. Weights and what lies above follow the thickness.
  */
-import { describe, expect, test } from 'vitest';
+import { describe, expect, test, vi } from 'vitest';
 import type { Scheme } from '../../core/job/schema.ts';
 import { assessed } from '../support/assessed.ts';
 import { leastPull } from './equilibrium-programme.ts';
 import { randomSchemes } from './random-arches.ts';
+
+// hundreds of programmes each: seconds at rest, more where the machine is busy
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 120_000 });
 
 /** Relative distance to either side at which the answer must differ. */
 const CLOSE = 2e-6;

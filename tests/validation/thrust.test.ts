@@ -3,7 +3,7 @@
  * Agreement to 1e-6 of the total load (of the safety itself): HiGHS holds its own conditions to 1e-10 at every block,
  * which the walk along eighty blocks of a thin ring can turn into 1e-8 of thrust.
  */
-import { beforeAll, describe, expect, test } from 'vitest';
+import { beforeAll, describe, expect, test, vi } from 'vitest';
 import { assessScheme } from '../../core/assess/assess.ts';
 import type { SchemeAssessment } from '../../core/assess/assessment.ts';
 import type { Scheme } from '../../core/job/schema.ts';
@@ -12,7 +12,10 @@ import { extremeThrust, leastPull } from './equilibrium-programme.ts';
 import { randomSchemes, shapes } from './random-arches.ts';
 import { totalLoad } from './total-load.ts';
 
-const EACH = 40;
+// hundreds of programmes each: seconds at rest, more where the machine is busy
+vi.setConfig({ testTimeout: 120_000, hookTimeout: 120_000 });
+
+const EACH = 30;
 const SEED = 1875;
 const AGREED = 1e-6;
 /** A ring that stands or falls by less than this pull over the total load is a tie that HiGHS cannot call. */
