@@ -1,7 +1,7 @@
 /** An axle on the ground over the arch: the wheels' print, and dotted how its load spreads on the way down to the ring. */
 import type { Point } from '../geometry/point.ts';
 import type { ResolvedLoad } from '../job/defaults.ts';
-import { backAt, blocksUnder, skyOver } from '../loading/sky.ts';
+import { backAt, blocksUnder } from '../loading/sky.ts';
 import type { Draught } from './draught.ts';
 import { heightAt } from './faces.ts';
 import { polyline, rectangle } from './path.ts';
@@ -23,8 +23,7 @@ export function axleSpread(draught: Draught, load: AxleLoad, about: About): Path
 
 /** The width at each depth is that of the load's calculation: `patch` and `dispersal` to each side for each metre down. */
 function edgeOfSpread(draught: Draught, { x, patch, dispersal }: AxleLoad, side: 1 | -1, about: About): PathItem[] {
-  const { ring, back, top } = draught;
-  const sky = skyOver(ring);
+  const { sky, back, top } = draught;
   const [under] = blocksUnder(sky, x);
   if (under === undefined) return [];
   const foot = backAt(sky, under.block, x);

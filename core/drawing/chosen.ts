@@ -35,9 +35,9 @@ export function drawChosen(draught: Draught, { line }: ChosenLine): DrawnChosen 
   return { outside };
 }
 
-export function letterChosen(draught: Draught, { line, label }: ChosenLine, { outside }: DrawnChosen): void {
+export function letterChosen(draught: Draught, chosen: ChosenLine, { outside }: DrawnChosen): void {
   for (const place of furthest(outside)) letterExcursion(draught, place);
-  if (label !== '') letterLine(draught, line, label);
+  if (chosen.label !== '') letterLine(draught, chosen);
 }
 
 interface Excursion {
@@ -103,14 +103,21 @@ function letterExcursion(draught: Draught, { joint, at, from, by }: Excursion): 
   put(draught, 'thrust-chosen', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
 }
 
-/** In the opening, near where the line passes the quarter. */
-function letterLine(draught: Draught, line: readonly (Point | null)[], label: string): void {
-  const { mm, places } = draught;
-  const at = line[Math.round(0.3 * (line.length - 1))] ?? line.find((point) => point !== null);
+/** In the opening, where it is widest and free. */
+function letterLine(draught: Draught, { line, label }: ChosenLine): void {
+  const { ring, places } = draught;
+  const at = line.find((point) => point !== null);
   if (at === undefined || at === null) return;
-  const placings = [6, 10, 14, 18].map((down): Placing => [
-    lettering(label, { x: at.x + mm(down / 2), y: at.y - mm(down) }, { role: 'text-force', about: ABOUT }),
-  ]);
+  const left = ring.joints[0]!.intrados;
+  const right = ring.joints.at(-1)!.intrados;
+  const crown = ring.crownIntrados.y;
+  const placings = [0.3, 0.2, 0.45, 0.1, 0.6].flatMap((up) =>
+    [0.27, 0.73].map((across): Placing => {
+      const foot = left.y + across * (right.y - left.y);
+      const place = { x: left.x + across * (right.x - left.x), y: foot + up * (crown - foot) };
+      return [lettering(label, place, { align: 'middle', role: 'text-force', about: ABOUT })];
+    }),
+  );
   const placed = places.placeSurely(placings, at);
   put(draught, 'thrust-chosen', ...placed.texts, ...(placed.leader === null ? [] : [placed.leader]));
 }

@@ -65,6 +65,8 @@ export function crackMark(
   );
   const lip = (side: 1 | -1): Point => along(from, inwards, -mm(MOUTH.depth), side * mm(MOUTH.half));
   return [
+    // parts the line from a hinge or a joint that it lies on
+    polyline('crack-ground', [start!, ...rest], about),
     polyline('crack', [start!, ...rest], about),
     polyline('crack', [lip(1), along(from, inwards, -mm(0.4)), lip(-1)], about),
   ];

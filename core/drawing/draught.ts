@@ -2,7 +2,7 @@
 import type { AssessedScheme } from '../assess/assess.ts';
 import { layersHeight } from '../loading/above.ts';
 import { topLevel } from '../loading/load-ring.ts';
-import { skyOver } from '../loading/sky.ts';
+import { skyOver, type Sky } from '../loading/sky.ts';
 import type { Edge } from '../geometry/curve.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Joint } from '../geometry/stations.ts';
@@ -33,8 +33,8 @@ export interface Draught extends AssessedScheme {
   readonly moved: MovedRing | null;
   /** The ring's joints as they are drawn, moved or not. */
   readonly standing: readonly Joint[];
-  /** Ends of the back that faces the sky: what lies above stands between them. */
-  readonly sky: { readonly left: Point; readonly right: Point };
+  /** The back that faces the sky, between whose ends what lies above stands. */
+  readonly sky: Sky;
 }
 
 /** Where what lies above ends on paper, m. */
@@ -71,7 +71,7 @@ export function beginDraught(
   const first = ring.joints[0]!;
   const soffit = { start: first.intrados, edges: mergeArcs(blocks.flatMap((block) => blockSoffit(ring, block))) };
   const back = { start: first.extrados, edges: mergeArcs(blocks.flatMap((block) => blockBack(ring, block))) };
-  const { left, right } = skyOver(ring);
+  const sky = skyOver(ring);
   return {
     ...assessed,
     millimetresPerMetre,
@@ -83,8 +83,8 @@ export function beginDraught(
     joints: drawnJoints(ring, mm(CLOSEST_JOINTS)),
     soffit,
     back,
-    top: topOf(assessed, Math.max(right.x - left.x, ring.crownExtrados.y) * TALLEST_ABOVE + mm(12)),
-    sky: { left, right },
+    top: topOf(assessed, Math.max(sky.right.x - sky.left.x, ring.crownExtrados.y) * TALLEST_ABOVE + mm(12)),
+    sky,
     moved,
     standing: moved?.joints ?? ring.joints,
   };

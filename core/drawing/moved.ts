@@ -29,7 +29,9 @@ export function drawMoved(draught: Draught, { ring: moved }: MovedPicture): void
     places.block([outline.start, ...outline.edges.map(({ to }) => to)]);
   });
   for (const opening of moved.openings) drawGap(draught, opening);
-  put(draught, 'as-it-was', outlined('as-it-was', bodyOutline(ring, 0, ring.blocks.length)));
+  const before = outlined('as-it-was', bodyOutline(ring, 0, ring.blocks.length));
+  put(draught, 'as-it-was', before);
+  places.blockPath(before);
   drawSupports(draught, support(draught, 0), support(draught, ring.joints.length - 1));
 }
 
@@ -65,8 +67,8 @@ function letterWidth(draught: Draught, { joint, contact, lips, width }: MovedOpe
   const mouth = midpoint(...lips);
   const outwards = Math.atan2(mouth.y - contact.y, mouth.x - contact.x);
   const text = millimetres(width);
-  const placings = [4, 6.5, 9].flatMap((away) =>
-    [0, 0.7, -0.7].map((aside): Placing => {
+  const placings = [4, 6.5, 9, 12].flatMap((away) =>
+    [0, 0.7, -0.7, 1.3, -1.3].map((aside): Placing => {
       const at = along(mouth, outwards + aside, mm(away));
       return [
         lettering(

@@ -130,6 +130,7 @@ export const STYLES = {
   'as-it-was': { pen: 0.18, stroke: 'quiet', dash: [1.2, 1.2] },
   'opening-gap': { pen: 0.25, stroke: 'madder', fill: 'sheet' },
   crack: { pen: 0.35, stroke: 'madder' },
+  'crack-ground': { pen: 0.7, stroke: 'sheet' },
   dimension: { pen: 0.13, stroke: 'ink' },
   'dimension-stroke': { pen: 0.35, stroke: 'ink' },
   leader: { pen: 0.13, stroke: 'quiet' },
