@@ -12,6 +12,7 @@ import { drawMasonry } from './masonry.ts';
 import { drawMechanism } from './mechanism.ts';
 import { drawMoved, letterMoved, type MovedPicture } from './moved.ts';
 import { drawNotes } from './notes.ts';
+import { drawOther, type OtherScheme } from './other.ts';
 import { drawReactions } from './reactions.ts';
 import { makeScene, type LayerName, type Scene } from './scene.ts';
 import { plainText } from './text.ts';
@@ -26,6 +27,8 @@ export interface Overlays {
    * ring as it stands are left off then.
    */
   readonly moved?: MovedPicture;
+  /** Another scheme to compare with; left off while the ring is drawn moved. */
+  readonly other?: OtherScheme;
   /** Layers to leave off. Lettering keeps the places that it has with them. */
   readonly hide?: readonly LayerName[];
 }
@@ -42,13 +45,14 @@ export interface ElevationOptions extends Overlays {
  * are no lines of thrust, and the mechanism is drawn where the assessment has one.
  */
 export function elevation(assessed: AssessedScheme, options: ElevationOptions): Scene {
-  const { millimetresPerMetre, length = metres, chosen, moved, hide } = options;
+  const { millimetresPerMetre, length = metres, chosen, moved, other, hide } = options;
   const draught = beginDraught(assessed, millimetresPerMetre, length, moved?.ring ?? null);
   drawAbove(draught);
   if (moved === undefined) {
     drawMasonry(draught);
     drawThrust(draught);
     drawMechanism(draught);
+    if (other !== undefined) drawOther(draught, other);
   } else {
     drawMoved(draught, moved);
   }

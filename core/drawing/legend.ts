@@ -5,7 +5,7 @@ import type { Point } from '../geometry/point.ts';
 import type { Column } from './column.ts';
 import { crackMark } from './cracks.ts';
 import { hatchLines } from './hatch.ts';
-import { arrowhead, circle, lettering, polygon, rectangle, stroke } from './path.ts';
+import { arrowhead, circle, lettering, polygon, rectangle, shifted, stroke } from './path.ts';
 import type { Lettering, PathItem, SceneItem } from './scene.ts';
 import type { Role } from './style.ts';
 
@@ -47,17 +47,20 @@ export function drawLegend(
 export interface LegendOverlays {
   readonly chosen?: boolean;
   readonly moved?: boolean;
+  /** Name of the scheme laid over this one. */
+  readonly other?: string | undefined;
 }
 
 export function legendEntries(
   resolved: ResolvedScheme,
   assessment: SchemeAssessment,
-  { chosen = false, moved = false }: LegendOverlays = {},
+  { chosen = false, moved = false, other }: LegendOverlays = {},
 ): LegendEntry[] {
   return [
     ...(moved ? movedEntries() : stateEntries(assessment)),
     ...(chosen ? [{ words: 'Chosen line of thrust', swatch: [level('thrust-chosen')] }] : []),
     ...(chosen ? [{ words: 'Where it leaves the ring', swatch: outside() }] : []),
+    ...(other === undefined || moved ? [] : otherEntries(other)),
     ...schemeEntries(resolved),
     ...(assessment.reactions && !moved
       ? [{ words: 'Reaction at least thrust', swatch: pointer('reaction', 'reaction-head', 1.8) }]
@@ -69,6 +72,13 @@ export function legendEntries(
 const movedEntries = (): LegendEntry[] => [
   { words: 'Joint that opens, in contact at the dot', swatch: wedge('opening-gap', 'hinge-mechanism') },
   { words: 'Ring before the movement', swatch: [level('as-it-was')] },
+];
+
+/** Which of its lines are there is seen from the board; the pens are explained together. */
+const otherEntries = (name: string): LegendEntry[] => [
+  { words: `${name}: outline of the ring`, swatch: [level('other-outline')] },
+  { words: `${name}: line of least thrust`, swatch: [level('other-least')] },
+  { words: `${name}: line of greatest thrust`, swatch: [level('other-greatest')] },
 ];
 
 function stateEntries({ thrust, mechanism }: SchemeAssessment): LegendEntry[] {
@@ -166,12 +176,3 @@ const pointer = (shaft: Role, head: Role, slender: number): SceneItem[] => [
   stroke(shaft, { x: -HALF, y: 0 }, { x: HALF - 3, y: 0 }),
   arrowhead(head, { x: HALF, y: 0 }, 0, 3.2, undefined, slender),
 ];
-
-function shifted(item: SceneItem, by: Point): SceneItem {
-  const move = ({ x, y }: Point): Point => ({ x: x + by.x, y: y + by.y });
-  if (item.kind === 'text') return { ...item, at: move(item.at) };
-  const edges = item.edges.map((edge) =>
-    edge.kind === 'line' ? { ...edge, to: move(edge.to) } : { ...edge, to: move(edge.to), centre: move(edge.centre) },
-  );
-  return { ...item, start: move(item.start), edges };
-}

@@ -2,7 +2,7 @@
 import type { Edge } from '../geometry/curve.ts';
 import type { Outline } from '../geometry/ring-blocks.ts';
 import type { Point } from '../geometry/point.ts';
-import type { About, Align, Lettering, PathItem, TextItem } from './scene.ts';
+import type { About, Align, Lettering, PathItem, SceneItem, TextItem } from './scene.ts';
 import type { Role } from './style.ts';
 import { plainText, type Face } from './text.ts';
 
@@ -79,4 +79,14 @@ export interface LetteringStyle {
 export function lettering(text: string, at: Point, how: LetteringStyle = {}): TextItem {
   const { height = 2.5, face = 'regular', align = 'start', angle = 0, role = 'text', about } = how;
   return { kind: 'text', role, text: plainText(text), at, align, height, face, angle, about };
+}
+
+/** The same item elsewhere. */
+export function shifted(item: SceneItem, by: Point): SceneItem {
+  const move = ({ x, y }: Point): Point => ({ x: x + by.x, y: y + by.y });
+  if (item.kind === 'text') return { ...item, at: move(item.at) };
+  const edges = item.edges.map((edge) =>
+    edge.kind === 'line' ? { ...edge, to: move(edge.to) } : { ...edge, to: move(edge.to), centre: move(edge.centre) },
+  );
+  return { ...item, start: move(item.start), edges };
 }

@@ -24,6 +24,7 @@ export const LAYERS = [
   'joints',
   'lost-mortar',
   'as-it-was',
+  'other-scheme',
   'supports',
   'springing',
   'mechanism',

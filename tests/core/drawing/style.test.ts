@@ -23,14 +23,22 @@ describe.each(Object.keys(THEMES) as ThemeName[])('%s', (name) => {
     expect(contrast(drawnStyle(role, theme).fill!, sheet)).toBeGreaterThanOrEqual(4.5);
   });
 
-  it.each(['thrust-least', 'thrust-greatest', 'reaction', 'hinge-least', 'ring-edge', 'ghost', 'mark-fails'] as const)(
-    'draws %s to be seen on sheet, stone and wash alike',
-    (role) => {
-      for (const ground of [theme.sheet, theme.stone1, theme.wash ?? theme.sheet]) {
-        expect(contrast(drawnStyle(role, theme).stroke!, ground!)).toBeGreaterThanOrEqual(3);
-      }
-    },
-  );
+  it.each([
+    'thrust-least',
+    'thrust-greatest',
+    'reaction',
+    'hinge-least',
+    'ring-edge',
+    'ghost',
+    'mark-fails',
+    'thrust-chosen',
+    'crack',
+    'opening-gap',
+  ] as const)('draws %s to be seen on sheet, stone and wash alike', (role) => {
+    for (const ground of [theme.sheet, theme.stone1, theme.wash ?? theme.sheet]) {
+      expect(contrast(drawnStyle(role, theme).stroke!, ground!)).toBeGreaterThanOrEqual(3);
+    }
+  });
 });
 
 describe('without colour', () => {
@@ -47,6 +55,18 @@ describe('without colour', () => {
     ['thrust-least', 'ghost'],
     ['thrust-greatest', 'ghost'],
     ['joint', 'ring-edge'],
+    ['other-least', 'other-greatest'],
+    ['other-least', 'thrust-least'],
+    ['other-greatest', 'thrust-greatest'],
+    ['other-outline', 'as-it-was'],
+    ['other-outline', 'datum'],
+    ['thrust-chosen', 'thrust-least'],
+    ['thrust-chosen', 'thrust-greatest'],
+    ['backing-hatch', 'backing-bond'],
+    ['as-it-was', 'moved-stone'],
+    ['opening-gap', 'hinge-least'],
+    ['load-spread', 'load'],
+    ['curve', 'curve-limit'],
   ])('%s and %s differ by dash, pen or by being open', (a, b) => {
     expect(look(a)).not.toBe(look(b));
   });
