@@ -5,12 +5,14 @@ import { host } from './host/host.ts';
 import { NO_PHOTOGRAPHS } from './session/document.ts';
 import { BoardView } from './board/view.svelte.ts';
 import { Questions } from './questions/questions.svelte.ts';
+import { display } from './session/display.svelte.ts';
 import { Files } from './session/files.svelte.ts';
 import { firstJob } from './session/samples.ts';
 import { Session } from './session/session.svelte.ts';
 import { theme } from './session/theme.svelte.ts';
 
 theme.start();
+display.start();
 const session = new Session({ job: firstJob(), photographs: NO_PHOTOGRAPHS, file: null });
 const questions = new Questions(session);
 mount(App, {

@@ -22,6 +22,9 @@ export interface SheetOptions {
   readonly paper?: PaperName;
   /** How lengths are lettered; metres where not given. */
   readonly length?: LengthText;
+  /** Behind lengths in the columns; `m` where not given, empty where their lettering carries it. */
+  readonly lengthUnit?: string;
+  /** What the title block says of the units. */
   readonly units?: string;
 }
 
@@ -46,7 +49,7 @@ export function elevationSheet(assessed: AssessedScheme, title: SheetTitle, opti
   drawSideColumn(items, assessed, paper, {
     key: scene.key,
     texts: [...Object.values(title), resolved.masonry.name, ...resolved.loads.map(({ name }) => name)],
-    length: options.length ?? metres,
+    length: (value) => `${(options.length ?? metres)(value)} ${options.lengthUnit ?? 'm'}`.trim(),
   });
   const furniture = makeScene({ title: 'Sheet', description: '', millimetresPerUnit: 1 }, items);
   const views = [centred(scene, zone), { id: 'furniture', scene: furniture, at: { x: 0, y: 0 } }];

@@ -44,23 +44,23 @@ function given({ ring, masonry, above, backing, breadth, sway, cracks }: Resolve
   const rings = courses > 1 ? `${courses} rings of ` : '';
   const rows: Row[] = [['Ring', `${rings}${entered(ring.voussoirs)} voussoirs, ${ring.joints} joints`]];
   if (thickness === springingThickness) {
-    rows.push(['Thickness and breadth', `${length(thickness)} and ${length(breadth)} m`]);
+    rows.push(['Thickness and breadth', `${length(thickness)} and ${length(breadth)}`]);
   } else {
-    rows.push(['Thickness, crown to springing', `${length(thickness)} to ${length(springingThickness)} m`]);
-    rows.push(['Breadth', `${length(breadth)} m`]);
+    rows.push(['Thickness, crown to springing', `${length(thickness)} to ${length(springingThickness)}`]);
+    rows.push(['Breadth', length(breadth)]);
   }
   rows.push(['Masonry', masonry.name], ['Unit weight', `${entered(masonry.unitWeight)} kN/m³`]);
   if (above.kind === 'none') rows.push(['Above', 'nothing']);
-  else rows.push(['Above', `${above.kind} ${length(above.height)} m, ${entered(above.unitWeight)} kN/m³`]);
+  else rows.push(['Above', `${above.kind} ${length(above.height)}, ${entered(above.unitWeight)} kN/m³`]);
   if (above.kind !== 'none') {
     for (const layer of above.layers) {
-      rows.push([plainText(layer.name ?? 'layer'), `${length(layer.thickness)} m, ${entered(layer.unitWeight)} kN/m³`]);
+      rows.push([plainText(layer.name ?? 'layer'), `${length(layer.thickness)}, ${entered(layer.unitWeight)} kN/m³`]);
     }
   }
   if (above.sidePressure !== 0) rows.push(['Side pressure', `${entered(above.sidePressure)} of the vertical`]);
   if (backing !== null) {
     const counts = backing.counts === 'masonry' ? 'as masonry' : 'weight only';
-    rows.push(['Backing', `to ${length(backing.level)} m, ${counts}`]);
+    rows.push(['Backing', `to ${length(backing.level)}, ${counts}`]);
   }
   if (cracks.length > 0) rows.push(['Openings seen', String(cracks.length)]);
   if (sway !== 0) rows.push(['Sideways', `${entered(sway)} of gravity`]);

@@ -17,6 +17,7 @@ export interface SideColumnOptions {
   readonly key: readonly KeyEntry[];
   /** What a person entered and the sheet prints, looked through for letters that the font lacks. */
   readonly texts: readonly string[];
+  /** Lengths with their unit. */
   readonly length: LengthText;
 }
 

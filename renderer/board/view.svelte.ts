@@ -6,7 +6,7 @@ import { textCorners } from '../../core/drawing/extent.ts';
 import type { Point } from '../../core/geometry/point.ts';
 import { formatQuantity } from '../../core/quantity/format.ts';
 import { measureAt, loadMeasures, type Measure } from '../session/measures.ts';
-import { SHOWN } from '../session/preferences.ts';
+import { letteredLength, SHOWN } from '../session/preferences.ts';
 import type { Session } from '../session/session.svelte.ts';
 import { theme } from '../session/theme.svelte.ts';
 import type { Grip } from './gestures.ts';
@@ -63,7 +63,7 @@ export class BoardView {
   readonly scene: Scene | null = $derived.by(() => {
     const { assessed } = this.#session;
     if (assessed === null || this.#scale === null) return null;
-    return elevation(assessed, { millimetresPerMetre: this.#scale, ...this.#asked.overlays });
+    return elevation(assessed, { millimetresPerMetre: this.#scale, length: letteredLength, ...this.#asked.overlays });
   });
   readonly handles: readonly Handle[] = $derived.by(() => {
     const { assessed } = this.#session;
@@ -93,7 +93,7 @@ export class BoardView {
     const { assessed } = this.#session;
     this.#follows = true;
     this.#viewport = fitted(width, height, this.#insets, (scale) =>
-      assessed === null ? null : elevation(assessed, { millimetresPerMetre: scale }).bounds,
+      assessed === null ? null : elevation(assessed, { millimetresPerMetre: scale, length: letteredLength }).bounds,
     );
   }
 

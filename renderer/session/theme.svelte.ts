@@ -22,8 +22,8 @@ class Theme {
     this.#mark();
   }
 
-  next(): void {
-    this.choice = CHOICES[(CHOICES.indexOf(this.choice) + 1) % CHOICES.length] ?? 'system';
+  choose(choice: ThemeChoice): void {
+    this.choice = choice;
     localStorage.setItem(KEY, this.choice);
     this.#mark();
   }
