@@ -107,7 +107,7 @@ function letterExcursion(draught: Draught, { joint, at, from, by }: Excursion): 
 function letterLine(draught: Draught, { line, label }: ChosenLine): void {
   const { ring, places } = draught;
   const at = line.find((point) => point !== null);
-  if (at === undefined || at === null) return;
+  if (at === undefined) return;
   const left = ring.joints[0]!.intrados;
   const right = ring.joints.at(-1)!.intrados;
   const crown = ring.crownIntrados.y;

@@ -33,12 +33,18 @@ function drawBreadth(draught: Draught): void {
 }
 
 function drawAboveNote(draught: Draught): void {
-  const { resolved, sky, top, mm, places } = draught;
+  const { resolved, top } = draught;
   const { kind, unitWeight, openings } = resolved.above;
   if (kind === 'none') return;
+  const words = `${kind} above, ${entered(unitWeight)} kN/m³`;
+  noteInside(draught, words);
   const hidden = openings.filter(({ sill }) => sill >= top.level).length;
-  const higher = hidden === 0 ? '' : `, ${hidden} ${hidden === 1 ? 'opening' : 'openings'} higher up`;
-  const words = `${kind} above, ${entered(unitWeight)} kN/m³${higher}`;
+  if (hidden > 0) noteInside(draught, `${hidden} ${hidden === 1 ? 'opening' : 'openings'} higher up`);
+}
+
+/** At either edge of what lies above, as high as there is room. */
+function noteInside(draught: Draught, words: string): void {
+  const { sky, top, mm, places } = draught;
   const width = mm(textWidth(words, 2.5) + 4);
   if (width > sky.right.x - sky.left.x) return;
   const placings: Placing[] = [];

@@ -3,12 +3,15 @@ import fc from 'fast-check';
 import { assessScheme, type AssessedScheme } from '../../../core/assess/assess.ts';
 import type { Load, Profile, Scheme } from '../../../core/job/schema.ts';
 
-export function assessed(
-  scheme: Omit<Scheme, 'id' | 'breadth'> & Partial<Scheme>,
-  name = 'North door',
-): AssessedScheme {
+type Given = Omit<Scheme, 'id' | 'breadth'> & Partial<Scheme>;
+
+function outcomeOf(scheme: Given, name: string) {
   const full: Scheme = { id: 's1', name: 'As found', breadth: 0.6, ...scheme };
-  const outcome = assessScheme({ id: 'a1', name, schemes: [full] }, full);
+  return assessScheme({ id: 'a1', name, schemes: [full] }, full);
+}
+
+export function assessed(scheme: Given, name = 'North door'): AssessedScheme {
+  const outcome = outcomeOf(scheme, name);
   if (!outcome.ok) throw new Error(JSON.stringify(outcome.problems));
   return outcome.assessed;
 }
@@ -105,6 +108,132 @@ export const anyArch: fc.Arbitrary<AssessedScheme> = profiles.chain((profile) =>
       }),
     );
 });
+
+/** A brick road bridge of several rings that tapers, with everything on it that can be surveyed. */
+export const fordBridge = (changes: Partial<Given> = {}): AssessedScheme =>
+  assessed(
+    {
+      profile: { shape: 'segmental', span: 6.4, rise: 1.5 },
+      ring: {
+        thickness: 0.46,
+        springingThickness: 0.62,
+        voussoirs: 41,
+        joints: 'radial',
+        courses: 4,
+        lostMortar: [
+          { face: 'intrados', depth: 0.06 },
+          { face: 'extrados', depth: 0.12, joint: 20 },
+        ],
+      },
+      breadth: 4.2,
+      masonry: { name: 'brick in lime', unitWeight: 19, strength: 4.2, friction: 0.6 },
+      backing: { level: 1.25, counts: 'masonry', unitWeight: 20 },
+      above: {
+        kind: 'fill',
+        height: 0.5,
+        unitWeight: 18,
+        layers: [
+          { name: 'sub-base', thickness: 0.2, unitWeight: 20 },
+          { name: 'setts', thickness: 0.12, unitWeight: 24 },
+        ],
+      },
+      loads: [{ id: 'cart', name: 'cart axle', kind: 'axle', x: 1.1, force: 60, patch: 0.3, dispersal: 0.5 }],
+      cracks: [
+        { id: 'c1', joint: 20, face: 'intrados', width: 0.003, seenOn: '2026-05-14' },
+        { id: 'c2', joint: 0, face: 'extrados', width: 0.006, seenOn: '2026-05-14' },
+        { id: 'c3', along: 0.8, face: 'extrados' },
+      ],
+      ...changes,
+    },
+    'Ford bridge',
+  );
+
+const share = fc.double({ min: 0, max: 1, noNaN: true });
+const face = fc.constantFrom('intrados' as const, 'extrados' as const);
+
+/** Arches with all that a survey may add: taper, courses, lost mortar, backing, layers, openings, axles and cracks. */
+export const anySurveyedArch: fc.Arbitrary<AssessedScheme> = profiles
+  .chain((profile) => {
+    const span = profile.shape === 'measured' ? 1 : profile.span;
+    const thickness = fc.double({ min: 0.06, max: 0.15, noNaN: true }).map((part) => part * span);
+    const height = fc.double({ min: 0.1, max: 1.2, noNaN: true }).map((part) => part * span);
+    return fc
+      .record({
+        thickness,
+        taper: fc.option(fc.double({ min: 0.8, max: 1.6, noNaN: true }), { nil: 1 }),
+        voussoirs: fc.integer({ min: 3, max: 60 }),
+        courses: fc.integer({ min: 1, max: 6 }),
+        lost: fc.array(fc.record({ face, depth: fc.double({ min: 0.02, max: 0.3, noNaN: true }) }), { maxLength: 2 }),
+        height,
+        backing: fc.option(
+          fc.record({ level: share, counts: fc.constantFrom('weight' as const, 'masonry' as const) }),
+          {
+            nil: undefined,
+          },
+        ),
+        layers: fc.array(fc.record({ name: names, thickness: fc.double({ min: 0.01, max: 0.4, noNaN: true }) }), {
+          maxLength: 4,
+        }),
+        opening: fc.boolean(),
+        loads: loads(span),
+        axle: fc.option(fc.double({ min: -0.45, max: 0.45, noNaN: true }), { nil: undefined }),
+        cracks: fc.array(
+          fc.record({
+            along: share,
+            face,
+            width: fc.option(fc.double({ min: 0.0002, max: 0.03, noNaN: true }), { nil: undefined }),
+            seenOn: fc.constantFrom(undefined, '2026-05-14', 'before the flood of 1968, as told'),
+          }),
+          { maxLength: 9 },
+        ),
+      })
+      .map((given) => {
+        const crown = ('rise' in profile ? profile.rise : span / 2) + given.thickness;
+        const axles =
+          given.axle === undefined ? [] : [{ id: 'axle', kind: 'axle' as const, x: given.axle * span, force: 40 }];
+        return outcomeOf(
+          {
+            profile,
+            ring: {
+              thickness: given.thickness,
+              springingThickness: given.thickness * given.taper,
+              voussoirs: given.voussoirs,
+              courses: given.courses,
+              lostMortar: given.lost.map((lost) => ({ face: lost.face, depth: lost.depth * given.thickness })),
+            },
+            above: {
+              kind: 'fill',
+              height: given.height,
+              layers: given.layers.map((layer) => ({ ...layer, unitWeight: 20 })),
+              openings: given.opening
+                ? [
+                    {
+                      from: -0.1 * span,
+                      to: 0.15 * span,
+                      sill: crown + 0.2 * given.height,
+                      head: crown + 0.8 * given.height,
+                    },
+                  ]
+                : [],
+            },
+            ...(given.backing === undefined
+              ? {}
+              : { backing: { level: given.backing.level * crown, counts: given.backing.counts } }),
+            loads: [...given.loads, ...axles],
+            cracks: given.cracks.map(({ along, face: gapes, width, seenOn }, i) => ({
+              id: `c${i}`,
+              along,
+              face: gapes,
+              ...(width === undefined ? {} : { width }),
+              ...(seenOn === undefined ? {} : { seenOn }),
+            })),
+          },
+          'Any arch',
+        );
+      });
+  })
+  .filter((outcome) => outcome.ok)
+  .map(({ assessed }) => assessed);
 
 export const SHEET_TITLE = {
   owner: 'Harrowmere Estate Office',

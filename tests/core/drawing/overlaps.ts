@@ -2,6 +2,7 @@
 import { textCorners } from '../../../core/drawing/extent.ts';
 import { apart } from '../../../core/drawing/places.ts';
 import { insideFrame } from '../../../core/drawing/papers.ts';
+import type { Scene } from '../../../core/drawing/scene.ts';
 import { onPaper, type Sheet } from '../../../core/drawing/sheet.ts';
 import type { Point } from '../../../core/geometry/point.ts';
 
@@ -39,4 +40,11 @@ export function faultsOf(sheet: Sheet): string[] {
     }
   });
   return faults;
+}
+
+/** A scene without a sheet has no frame to leave. */
+export function overlapsIn(scene: Scene): string[] {
+  const size = 1e6;
+  const view = { id: 'view', scene, at: { x: size / 2, y: size / 2 } };
+  return faultsOf({ title: '', description: '', paper: { name: 'large', width: size, height: size }, views: [view] });
 }
