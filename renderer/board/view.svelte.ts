@@ -59,16 +59,18 @@ export class BoardView {
 
   readonly #insets = $derived({ left: MARGIN, top: MARGIN, right: MARGIN, bottom: MARGIN + this.foot });
   readonly viewport: Viewport | null = $derived(this.#viewport);
+  /** What is laid over the elevation to show an answer. */
+  readonly overlays: Overlays = $derived.by(() => this.#asked.overlays);
   readonly #scale: number | null = $derived(this.#viewport === null ? null : millimetresPerMetre(this.#viewport));
   readonly scene: Scene | null = $derived.by(() => {
     const { assessed } = this.#session;
     if (assessed === null || this.#scale === null) return null;
-    return elevation(assessed, { millimetresPerMetre: this.#scale, length: letteredLength, ...this.#asked.overlays });
+    return elevation(assessed, { millimetresPerMetre: this.#scale, length: letteredLength, ...this.overlays });
   });
   readonly handles: readonly Handle[] = $derived.by(() => {
     const { assessed } = this.#session;
     // measures are taken hold of on the arch as it is, not on a moved one
-    const moved = this.#asked.overlays.moved !== undefined;
+    const moved = this.overlays.moved !== undefined;
     return assessed === null || this.scene === null || moved ? [] : handlesOf(assessed, this.scene);
   });
   readonly theme: Theme = $derived(boardTheme(theme.dark, theme.forced));
@@ -76,7 +78,7 @@ export class BoardView {
   readonly marked: readonly MarkedJoint[] = $derived.by(() => {
     const { selection, assessed } = this.#session;
     if (selection?.kind !== 'joint') return [];
-    const ring = this.#asked.overlays.moved?.ring ?? assessed?.ring;
+    const ring = this.overlays.moved?.ring ?? assessed?.ring;
     const joint = ring?.joints[selection.joint];
     return joint === undefined ? [] : [{ number: selection.joint, joint }];
   });

@@ -46,8 +46,9 @@ export const lostMortarMeasures = (place: number): readonly Measure[] => [
   },
   {
     path: `ring.lostMortar.${place}.joint`,
-    name: 'Joint, empty for all',
+    name: 'At joint',
     kind: 'plain',
+    empty: 'all joints',
     read: ({ ring }) => ring.lostMortar[place]?.joint ?? null,
     set: (scheme, joint) => setLostMortar(scheme, place, { joint }),
     forget: (scheme) => setLostMortar(scheme, place, { joint: undefined }),
@@ -58,7 +59,7 @@ export const lostMortarMeasures = (place: number): readonly Measure[] => [
 export const BACKING: readonly Measure[] = [
   {
     path: 'backing.level',
-    name: 'Over the springing line',
+    name: 'Up to level',
     kind: 'length',
     read: ({ backing }) => backing?.level ?? null,
     set: (scheme, level) => setBacking(scheme, { level }),
@@ -169,6 +170,7 @@ export const ROAD: readonly Measure[] = ROAD_FIELDS.map(([field, name]) => ({
   path: `road.${field}`,
   name,
   kind: 'plain',
+  empty: field === 'spanRise' ? 'to be read' : 'taken as 1',
   read: ({ road }) => road?.[field] ?? null,
   set: (scheme, value) => setRoad(scheme, { [field]: value }),
   forget: (scheme) => setRoad(scheme, { [field]: undefined }),

@@ -31,6 +31,8 @@ export interface Measure {
   readonly set: (scheme: Scheme, value: number) => Scheme;
   /** Takes the entry away, so that what is usually assumed counts again. Absent where an entry must be. */
   readonly forget?: (scheme: Scheme) => Scheme;
+  /** What no figure means, where it is not that it is not known. */
+  readonly empty?: string;
   /** A count: whole figures only. */
   readonly whole?: true;
 }
