@@ -86,7 +86,11 @@ export class Column {
       const last = i === texts.length - 1;
       const needed = paragraphHeight(text, this.width, how.height) + (last ? 0 : more);
       if (needed > this.room - kept) {
-        this.paragraph(layer, `and ${texts.length - i} more`, how);
+        this.paragraph(
+          layer,
+          i === 0 ? `${texts.length}, listed in the findings` : `and ${texts.length - i} more`,
+          how,
+        );
         return;
       }
       this.paragraph(layer, text, how);

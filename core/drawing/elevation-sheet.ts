@@ -3,9 +3,10 @@
  * at the right, cautions and title block at the foot. The same arch on the same paper is always the same sheet.
  */
 import type { AssessedScheme } from '../assess/assess.ts';
+import type { ResolvedScheme } from '../job/defaults.ts';
 import { metres } from '../quantity/figures.ts';
 import type { LengthText } from './draught.ts';
-import { elevation } from './elevation.ts';
+import { elevation, type Overlays } from './elevation.ts';
 import type { Box } from './extent.ts';
 import { drawCautions, drawingZone, footHeight, VIEW_TITLE } from './layout.ts';
 import { insideFrame, paper, PAPER_NAMES, SCALES, type PaperName, type Scale } from './papers.ts';
@@ -26,6 +27,8 @@ export interface SheetOptions {
   readonly lengthUnit?: string;
   /** What the title block says of the units. */
   readonly units?: string;
+  /** One answer laid over the elevation, and explained in the legend. */
+  readonly overlays?: Overlays;
 }
 
 /** What the title block says besides what the drawing itself knows. */
@@ -48,13 +51,21 @@ export function elevationSheet(assessed: AssessedScheme, title: SheetTitle, opti
   drawViewTitle(items, scale, zone);
   drawSideColumn(items, assessed, paper, {
     key: scene.key,
-    texts: [...Object.values(title), resolved.masonry.name, ...resolved.loads.map(({ name }) => name)],
+    texts: [...Object.values(title), ...enteredTexts(resolved)],
+    overlays: options.overlays ?? {},
     length: (value) => `${(options.length ?? metres)(value)} ${options.lengthUnit ?? 'm'}`.trim(),
   });
   const furniture = makeScene({ title: 'Sheet', description: '', millimetresPerUnit: 1 }, items);
   const views = [centred(scene, zone), { id: 'furniture', scene: furniture, at: { x: 0, y: 0 } }];
   return { title: headingOf(title), description: scene.description, paper, views };
 }
+
+const enteredTexts = ({ masonry, loads, above, cracks }: ResolvedScheme): string[] => [
+  masonry.name,
+  ...loads.map(({ name }) => name),
+  ...above.layers.map(({ name }) => name ?? ''),
+  ...cracks.map(({ seenOn }) => seenOn ?? ''),
+];
 
 const headingOf = ({ title, subtitle }: SheetTitle): string =>
   [title, subtitle]
@@ -89,6 +100,7 @@ function fitOn(paper: Paper, assessed: AssessedScheme, options: SheetOptions): F
     const { millimetresPerMetre } = scale;
     if (least * millimetresPerMetre > width) continue;
     const scene = elevation(assessed, {
+      ...options.overlays,
       millimetresPerMetre,
       ...(options.length === undefined ? {} : { length: options.length }),
     });

@@ -8,6 +8,7 @@ import { hatchLines } from './hatch.ts';
 import { arrowhead, circle, lettering, polygon, rectangle, shifted, stroke } from './path.ts';
 import type { Lettering, PathItem, SceneItem } from './scene.ts';
 import type { Role } from './style.ts';
+import { cutToWidth, plainText } from './text.ts';
 
 /** mm */
 const SWATCH = 14;
@@ -21,23 +22,20 @@ export interface LegendEntry {
 }
 
 /** Room that the legend needs, mm. */
-export const legendHeight = (scheme: ResolvedScheme, assessment: SchemeAssessment): number =>
-  HEADING + ROW * legendEntries(scheme, assessment).length;
+export const legendHeight = (entries: readonly LegendEntry[]): number => HEADING + ROW * entries.length;
 
-export function drawLegend(
-  column: Column,
-  scheme: ResolvedScheme,
-  assessment: SchemeAssessment,
-  letters: Lettering,
-): void {
-  const entries = legendEntries(scheme, assessment);
+export function drawLegend(column: Column, entries: readonly LegendEntry[], letters: Lettering): void {
   column.heading('legend', 'Legend');
   for (const { words, swatch } of entries) {
     const centre = { x: column.left + SWATCH / 2, y: column.top - ROW / 2 };
     column.put('legend', ...swatch.map((item) => shifted(item, centre)));
     column.put(
       'legend',
-      lettering(words, { x: column.left + SWATCH + 2.5, y: centre.y - letters / 2 }, { height: letters }),
+      lettering(
+        cutToWidth(plainText(words), column.width - SWATCH - 2.5, letters),
+        { x: column.left + SWATCH + 2.5, y: centre.y - letters / 2 },
+        { height: letters },
+      ),
     );
     column.space(ROW);
   }

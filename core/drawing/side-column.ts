@@ -2,9 +2,9 @@
 import type { AssessedScheme } from '../assess/assess.ts';
 import { Column } from './column.ts';
 import type { LengthText } from './draught.ts';
-import { headlineOf } from './elevation.ts';
+import { headlineOf, type Overlays } from './elevation.ts';
 import { drawChecks, drawKeyFigures } from './key-figures.ts';
-import { drawLegend, legendHeight } from './legend.ts';
+import { drawLegend, legendEntries, legendHeight } from './legend.ts';
 import { columnWidth, footHeight, isSmall, PAD } from './layout.ts';
 import { insideFrame } from './papers.ts';
 import { stroke } from './path.ts';
@@ -19,6 +19,7 @@ export interface SideColumnOptions {
   readonly texts: readonly string[];
   /** Lengths with their unit. */
   readonly length: LengthText;
+  readonly overlays: Overlays;
 }
 
 /** What finds no room is counted in its place, never left out without a word. */
@@ -26,7 +27,7 @@ export function drawSideColumn(
   items: Items,
   assessed: AssessedScheme,
   paper: Paper,
-  { key, texts, length }: SideColumnOptions,
+  { key, texts, length, overlays }: SideColumnOptions,
 ): void {
   const { resolved, result } = assessed;
   const inside = insideFrame(paper);
@@ -36,8 +37,12 @@ export function drawSideColumn(
   addItems(items, 'frame', stroke('rule', { x: left - PAD, y: inside.top }, { x: left - PAD, y: bottom }));
   const small = isSmall(paper);
   const column = new Column(items, left, width, inside.top - PAD, bottom + 2);
-  const legend = legendHeight(resolved, result);
-  const kept = legend + LISTS_IN_SHORT;
+  const entries = legendEntries(resolved, result, {
+    chosen: overlays.chosen !== undefined,
+    moved: overlays.moved !== undefined,
+    other: overlays.other?.name,
+  });
+  const kept = legendHeight(entries) + LISTS_IN_SHORT;
   column.keepFree(kept);
   column.paragraph('figures', headlineOf(result), { height: small ? 2.5 : 3.5 });
   column.space(small ? 2 : 4);
@@ -46,7 +51,7 @@ export function drawSideColumn(
   drawChecks(column, result);
   column.keepFree(-kept);
   column.space(Math.min(2, column.room - kept));
-  drawLegend(column, resolved, result, small ? 1.8 : 2.5);
+  drawLegend(column, entries, small ? 1.8 : 2.5);
   const loads = key.map(({ mark, meaning }) => `${mark} – ${meaning}`);
   drawList(column, 'legend', 'Loads', loads);
   drawList(

@@ -5,13 +5,14 @@ import { movementPatterns } from '../../../core/assess/further.ts';
 import { axleEnvelope, spreadLeft } from '../../../core/assess/long-questions.ts';
 import { lineAtShare, lineThrough, movement, type JointReport } from '../../../core/assess/questions.ts';
 import { axleFigure } from '../../../core/drawing/axle-figure.ts';
+import { elevationSheet } from '../../../core/drawing/elevation-sheet.ts';
 import { elevation } from '../../../core/drawing/elevation.ts';
 import { mechanismFrame, motionsOfOpenings, movedRing, patternFrame } from '../../../core/drawing/moved-ring.ts';
 import type { LayerName, PathItem, Scene, TextItem } from '../../../core/drawing/scene.ts';
 import { spreadFigure } from '../../../core/drawing/spread-figure.ts';
 import { stressBlockFigure } from '../../../core/drawing/stress-figure.ts';
-import { anySurveyedArch, fordBridge, northDoor, thinRing } from './arches.ts';
-import { overlapsIn } from './overlaps.ts';
+import { anySurveyedArch, fordBridge, northDoor, SHEET_TITLE, thinRing } from './arches.ts';
+import { faultsOf, letteringOf, overlapsIn } from './overlaps.ts';
 
 const AT_1_20 = { millimetresPerMetre: 50 };
 const layerNames = (scene: Scene) => scene.layers.map(({ name }) => name);
@@ -97,6 +98,30 @@ describe('a moved ring', () => {
       expect(still).toMatchObject({ dx: expect.closeTo(0, 9), dy: expect.closeTo(0, 9), sin: expect.closeTo(0, 9) });
     }
   });
+});
+
+it('goes onto a sheet with its legend, in place of what it hides', () => {
+  const fall = { ring: mechanismFrame(thinRing(), 1)!, label: 'begins to fall' };
+  const sheet = elevationSheet(thinRing(), SHEET_TITLE, { overlays: { moved: fall } });
+  const lettered = letteringOf(sheet).map(({ text }) => text);
+  expect(lettered).toEqual(
+    expect.arrayContaining([
+      'begins to fall, not to scale',
+      'Ring before the movement',
+      'Joint that opens, in contact at the dot',
+    ]),
+  );
+  expect(lettered).not.toContain('Hinge of the mechanism');
+  expect(faultsOf(sheet)).toEqual([]);
+  const { line } = lineAtShare(fordBridge().built, 0.5)!;
+  const chosen = elevationSheet(fordBridge(), SHEET_TITLE, {
+    overlays: { chosen: { line, label: 'half way' } },
+    paper: 'A4',
+  });
+  expect(letteringOf(chosen).map(({ text }) => text)).toEqual(
+    expect.arrayContaining(['half way', 'Chosen line of thrust']),
+  );
+  expect(faultsOf(chosen)).toEqual([]);
 });
 
 it('leaves off the layers that are hidden, and changes nothing else', () => {
