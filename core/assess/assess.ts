@@ -130,6 +130,7 @@ function checksOf(built: BuiltScheme, answer: ThrustAnswer, middle: MiddleShare 
     compressionOnly({
       stands: answer.stands,
       thickness: governing ? distance(governing.intrados, governing.extrados) : 0,
+      altered: built.joints !== built.ring.joints,
       share: middle?.share ?? null,
       endlessThrust: middle !== null && middle.state === null,
       joints: numbers,

@@ -4,8 +4,10 @@ import { jointsInWords, type Check } from './check.ts';
 /** What the check needs to know of the ring. */
 export interface CompressionState {
   readonly stands: boolean;
-  /** Thickness of the ring where the line needs most of it, m. */
+  /** Length of the joint where the line needs most of it, m: the ring's thickness, or what is left and added of it. */
   readonly thickness: number;
+  /** Whether joints bear on other than the ring's own thickness: less lost mortar, or on through backing. */
+  readonly altered: boolean;
   /** Smallest share of every joint, about its middle, in which a line fits; null when no thickness would do. */
   readonly share: number | null;
   /** Whether that share is only approached as the thrust grows without limit. */
@@ -41,17 +43,22 @@ export function compressionOnly(state: CompressionState): Check {
   };
 }
 
+const ringOf = ({ thickness, altered }: CompressionState): string =>
+  altered
+    ? `joints that bear on ${figure(thickness)} m, less lost mortar and with backing that counts`
+    : `the ring of ${figure(thickness)} m`;
+
 /** m; what lies below cannot be measured on stone. */
 const LEAST_MIDDLE = 0.001;
 
 function reason(state: CompressionState, demand: number | null, safety: number | null): string {
-  const { stands, thickness, askedSafety } = state;
+  const { stands, askedSafety } = state;
   if (!stands) {
     const wanting =
       demand === null
         ? 'no ring of this shape would hold one, however thick'
         : `it would have to be about ${figure(demand)} m thick, about its present middle, to hold one`;
-    return `No line of thrust fits within the ring of ${figure(thickness)} m; ${wanting}. The loads can turn the ring about the hinges named.`;
+    return `No line of thrust fits within ${ringOf(state)}; ${wanting}. The loads can turn the ring about the hinges named.`;
   }
   const supports = state.endlessThrust
     ? ' The line comes this near the middle only as the thrust grows, so it asks what holds the arch to take any thrust.'
@@ -62,5 +69,5 @@ function reason(state: CompressionState, demand: number | null, safety: number |
       ? `at least the ${figure(askedSafety)} asked for`
       : `less than the ${figure(askedSafety)} asked for`;
   const middle = demand < LEAST_MIDDLE ? 'a middle strip of less than a millimetre' : `the middle ${figure(demand)} m`;
-  return `A line of thrust fits within ${middle} of a ring of ${figure(thickness)} m: geometric safety ${safetyFigure(safety)}, ${against}.${supports}`;
+  return `A line of thrust fits within ${middle} of ${ringOf(state)}: geometric safety ${safetyFigure(safety)}, ${against}.${supports}`;
 }
