@@ -14,7 +14,17 @@ import { handlesOf, nearestHandle, rounded, type Handle } from './handles.ts';
 import { itemAt } from './hit.ts';
 import type { MarkedJoint } from './paint.ts';
 import { boardTheme } from './theme.ts';
-import { fitted, millimetresPerMetre, panned, resized, toMetres, toPixels, zoomed, type Viewport } from './viewport.ts';
+import {
+  fitted,
+  millimetresPerMetre,
+  panned,
+  resized,
+  samePlace,
+  toMetres,
+  toPixels,
+  zoomed,
+  type Viewport,
+} from './viewport.ts';
 
 /** Room left round the drawing, px. */
 const MARGIN = 20;
@@ -94,9 +104,14 @@ export class BoardView {
   fit(width = this.#viewport?.width ?? 0, height = this.#viewport?.height ?? 0): void {
     const { assessed } = this.#session;
     this.#follows = true;
-    this.#viewport = fitted(width, height, this.#insets, (scale) =>
-      assessed === null ? null : elevation(assessed, { millimetresPerMetre: scale, length: letteredLength }).bounds,
+    const { overlays } = this;
+    const found = fitted(width, height, this.#insets, (scale) =>
+      assessed === null
+        ? null
+        : elevation(assessed, { millimetresPerMetre: scale, length: letteredLength, ...overlays }).bounds,
     );
+    // the same place again is no change: what keeps the drawing in sight would fit it for ever
+    if (this.#viewport === null || !samePlace(this.#viewport, found)) this.#viewport = found;
   }
 
   /** After an edit: fits again where the drawing has grown out of sight or shrunk to little, unless the paper was moved. */

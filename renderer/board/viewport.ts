@@ -41,6 +41,9 @@ export const toMetres = ({ scale, x, y }: Viewport, pixel: Point): Point => ({
 
 export const millimetresPerMetre = ({ scale }: Viewport): number => scale / PIXELS_PER_MILLIMETRE;
 
+export const samePlace = (a: Viewport, b: Viewport): boolean =>
+  a.width === b.width && a.height === b.height && a.scale === b.scale && a.x === b.x && a.y === b.y;
+
 export const panned = (viewport: Viewport, dx: number, dy: number): Viewport => ({
   ...viewport,
   x: viewport.x + dx,

@@ -45,4 +45,4 @@ export function placeInWords(x: number): string {
   return `${metres(Math.abs(x))} m ${x < 0 ? 'left' : 'right'} of mid-span`;
 }
 
-export const percent = (share: number): string => `${figure(100 * share, 2)} %`;
+export const percent = (share: number): string => `${figure(100 * share, 2)}\u00a0%`;
