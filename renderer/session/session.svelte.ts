@@ -12,6 +12,7 @@ import { outcomeOf } from './assessed.ts';
 import { NO_PHOTOGRAPHS, type OpenDocument } from './document.ts';
 import { historyOf, presentOf, recorded, redone, stepToRedo, stepToUndo, undone, type History } from './history.ts';
 import type { Measure } from './measures.ts';
+import { changedPlace, type Place } from './place.ts';
 import { tried, triedEntry, type Trial } from './trial.ts';
 
 /** A gesture under way. It shows the document it started with, changed; release makes one step of it. */
@@ -19,11 +20,6 @@ export interface Drag {
   preview(edit: (scheme: Scheme) => Scheme): void;
   release(name: string): void;
   abandon(): void;
-}
-
-interface Place {
-  readonly arch: string;
-  readonly scheme: string;
 }
 
 const NOWHERE: Place = { arch: '', scheme: '' };
@@ -156,7 +152,12 @@ export class Session {
   #step(step: (history: History) => History): void {
     this.#preview = null;
     this.refusal = '';
+    const before = this.settled;
     this.#history = step(this.#history);
+    // the eye follows the step to the scheme that it was about
+    const place = changedPlace(before, this.settled);
+    if (place === null || (place.arch === this.arch.id && place.scheme === this.scheme.id)) return;
+    this.show(place.arch, place.scheme);
   }
 }
 
