@@ -1,10 +1,11 @@
 /** The assessment with every question asked, for the command line and the sheets: some tens of milliseconds a scheme. */
 import type { Job } from '../job/schema.ts';
 import { assessSchemes, type AssessedScheme, type JobOutcome } from './assess.ts';
-import type { AxleAnswer, SchemeAssessment, SpreadAnswer } from './assessment.ts';
+import type { AxleAnswer, SchemeAssessment, SpreadAnswer, SupportAnswer } from './assessment.ts';
 import type { BuiltScheme } from './build.ts';
 import { combinationAnswers, crackReading, movementPatterns, proportions, roadComparison } from './further.ts';
 import { axleEnvelope, spreadLeft } from './long-questions.ts';
+import { supportEnough } from './supports.ts';
 
 /** Assesses every scheme of a job with all questions; problems carry paths from the job's root. */
 export function assessJobFully(job: Job): JobOutcome {
@@ -21,12 +22,18 @@ function askEverything({ built, result }: AssessedScheme): SchemeAssessment {
     ...result,
     combinations: combinationAnswers(built),
     movements,
+    ...(result.supports ? { supports: result.supports.map((answer) => withEnough(built, answer)) } : {}),
     ...(built.resolved.cracks.length > 0 ? { cracks: crackReading(built, movements) } : {}),
     spread: spreadAnswer(built),
     axles: axleAnswers(built),
     proportions: proportions(built),
     road: roadComparison(built),
   };
+}
+
+function withEnough(built: BuiltScheme, answer: SupportAnswer): SupportAnswer {
+  const enough = supportEnough(built, answer.side);
+  return enough === null ? answer : { ...answer, enough };
 }
 
 function spreadAnswer(built: BuiltScheme): SpreadAnswer | null {

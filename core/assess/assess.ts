@@ -25,6 +25,8 @@ import { usableThrust } from '../statics/usable-thrust.ts';
 import type { Assessment, SchemeAssessment } from './assessment.ts';
 import { buildScheme, withoutMeasuredBack, withThickness, type BuiltScheme } from './build.ts';
 import { loadFactors, swayCapacity } from './multiples.ts';
+import { supportsTogether } from './supports.ts';
+import { tieAnswers, tiesTogether } from './ties.ts';
 import { printedMechanism, printedProof, printedReaction, printedThrust, springingForces } from './printed.ts';
 
 /** A scheme with everything that was built to assess it, for the board and the drawings. */
@@ -91,6 +93,9 @@ function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): Sc
   const least = stands ? answer.least : null;
   const line = least === null ? [] : lineOfThrust(system, joints, least.state);
   const springings = least === null ? null : springingForces(system, least, line);
+  const ties = tiesTogether(built, answer);
+  const supports = supportsTogether(built, answer, ties);
+  const tied = ties && tieAnswers(ties, supports.leftOver);
   return {
     arch: arch.id,
     scheme: resolved.id,
@@ -114,7 +119,9 @@ function assess(arch: Arch, built: BuiltScheme, assumed: readonly Assumed[]): Sc
     loadFactors: loadFactors(built),
     swayCapacity: swayCapacity(built),
     ...(stands ? {} : { mechanism: printedMechanism(joints, blocks, answer.mechanism) }),
-    checks: checksOf(built, answer, middle),
+    checks: [...checksOf(built, answer, middle), ...supports.checks, ...(tied?.checks ?? [])],
+    ...(supports.answers.length > 0 ? { supports: supports.answers } : {}),
+    ...(tied === null ? {} : { ties: tied.answers }),
     proof: printedProof(joints, system, blocks, least, line, springings),
   };
 }

@@ -18,7 +18,9 @@ import type { CrackPattern } from '../statics/crack-pattern.ts';
 import type { CrownBalance } from '../statics/crown-balance.ts';
 import type { Hinge, Side } from '../statics/hinge.ts';
 import type { TurningHinge } from '../statics/thrust.ts';
+import type { SupportAnswer, TieAnswer } from './holding-answers.ts';
 
+export type { SupportAnswer, TieAnswer };
 export type { Assumed, Block, BlockForce, Check, CrownBalance, Hinge, Joint, Point, Side, Status };
 
 /** Where the resultant crosses each joint, joint 0 first; null coordinates where it runs parallel to the joint. */
@@ -123,6 +125,9 @@ export interface SchemeAssessment {
   /** Only when the arch does not stand. */
   readonly mechanism?: Mechanism | null;
   readonly checks: readonly Check[];
+  /** Bodies at the least and greatest thrust; rigid supports are not among them. */
+  readonly supports?: readonly SupportAnswer[];
+  readonly ties?: readonly TieAnswer[];
   readonly proof: Proof;
   readonly combinations?: readonly CombinationAnswer[];
   /** How the ring opens under each common movement; `opens` compares the openings of one movement with each other. */

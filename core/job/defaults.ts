@@ -5,19 +5,9 @@
  * `Assumed`; what is merely absent (no loads, no sway, level springings, no name) is filled without a word.
  */
 import type { Assumed } from './assumed.ts';
-import type {
-  Above,
-  Backing,
-  Combination,
-  Crack,
-  Load,
-  Masonry,
-  Profile,
-  Ring,
-  Road,
-  Scheme,
-  Support,
-} from './schema.ts';
+import type { Above, Backing, Combination, Crack, Load, Masonry, Profile, Ring, Road, Scheme } from './schema.ts';
+import { resolveSupports, type ResolvedSupports } from './support-defaults.ts';
+import { resolveTies, type ResolvedTie } from './tie-defaults.ts';
 
 /** Every field given; `null` only where the value is not known and nothing sensible stands in for it. */
 type Filled<T> = T extends unknown ? { readonly [Key in keyof T]-?: Exclude<T[Key], undefined> } : never;
@@ -52,8 +42,15 @@ export interface ResolvedScheme {
   /** Null where no road goes over the arch. */
   readonly road: Road | null;
   readonly cracks: readonly Crack[];
-  readonly supports: { readonly left: Support; readonly right: Support };
-  readonly asked: { readonly geometricSafety: number };
+  readonly supports: ResolvedSupports;
+  readonly ties: readonly ResolvedTie[];
+  readonly asked: {
+    readonly geometricSafety: number;
+    /** Of the supports about their toe. */
+    readonly overturning: number;
+    /** Of the supports on the ground. */
+    readonly baseSliding: number;
+  };
 }
 
 const VOUSSOIRS = 21;
@@ -90,10 +87,56 @@ export function resolveScheme(scheme: Scheme, index = 0): { resolved: ResolvedSc
     combinations: (scheme.combinations ?? []).map(resolveCombination),
     road: scheme.road ?? null,
     cracks: scheme.cracks ?? [],
-    supports: resolveSupports(scheme.supports ?? {}, assumed),
-    asked: { geometricSafety: scheme.asked?.geometricSafety ?? assumeSafety(assumed) },
+    ...resolveHolding(scheme, assumed),
+    asked: resolveAsked(scheme, assumed),
   };
   return { resolved, assumed };
+}
+
+/** Supports and ties. What they take from the ring is already listed with the ring. */
+function resolveHolding(scheme: Scheme, assumed: Assumed[]): Pick<ResolvedScheme, 'supports' | 'ties'> {
+  const { breadth, ring, profile, supports = {}, ties = [] } = scheme;
+  const masonry = resolveMasonry(scheme.masonry ?? {}, []);
+  const between = spanOf(profile) + 2 * (ring.springingThickness ?? ring.thickness);
+  return {
+    supports: resolveSupports(supports, { breadth, masonry }, assumed),
+    ties: resolveTies(ties, between, assumed),
+  };
+}
+
+function spanOf(profile: Profile): number {
+  if (profile.shape !== 'measured') return profile.span;
+  const [first, last] = [profile.points[0], profile.points[profile.points.length - 1]];
+  return first !== undefined && last !== undefined ? last[0] - first[0] : 0;
+}
+
+const OVERTURNING = 2;
+const BASE_SLIDING = 1.5;
+
+/** The margins of the supports weigh on nothing where the supports are rigid. */
+function resolveAsked({ asked, supports }: Scheme, assumed: Assumed[]): ResolvedScheme['asked'] {
+  const geometricSafety = asked?.geometricSafety ?? assumeSafety(assumed);
+  const hasBody = [supports?.left, supports?.right].some((side) => side !== undefined && side.kind !== 'rigid');
+  if (hasBody && asked?.overturning === undefined) {
+    assumed.push({
+      field: 'asked.overturning',
+      value: OVERTURNING,
+      because:
+        'No safety against overturning is asked for; 2 is taken (1.5 in some codes; from memory; typical, verify).',
+    });
+  }
+  if (hasBody && asked?.baseSliding === undefined) {
+    assumed.push({
+      field: 'asked.baseSliding',
+      value: BASE_SLIDING,
+      because: 'No safety against sliding on the ground is asked for; 1.5 is taken (from memory; typical, verify).',
+    });
+  }
+  return {
+    geometricSafety,
+    overturning: asked?.overturning ?? OVERTURNING,
+    baseSliding: asked?.baseSliding ?? BASE_SLIDING,
+  };
 }
 
 function resolveProfile(profile: Profile, assumed: Assumed[]): ResolvedProfile {
@@ -267,24 +310,6 @@ const resolveCombination = (combination: Combination): ResolvedCombination => ({
   variable: combination.variable ?? 1,
   factors: combination.factors ?? [],
 });
-
-const RIGID: Support = { kind: 'rigid' };
-
-function resolveSupports(supports: NonNullable<Scheme['supports']>, assumed: Assumed[]): ResolvedScheme['supports'] {
-  const taken = 'taken to neither spread, sink nor turn (the usual first step).';
-  const { left, right } = supports;
-  if (left === undefined && right === undefined) {
-    assumed.push({ field: 'supports', value: 'rigid', because: `The supports are not described; they are ${taken}` });
-  } else if (left === undefined || right === undefined) {
-    const side = left === undefined ? 'left' : 'right';
-    assumed.push({
-      field: `supports.${side}`,
-      value: 'rigid',
-      because: `The ${side} support is not described; it is ${taken}`,
-    });
-  }
-  return { left: left ?? RIGID, right: right ?? RIGID };
-}
 
 function assumeSafety(assumed: Assumed[]): number {
   assumed.push({

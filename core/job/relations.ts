@@ -8,6 +8,7 @@ import { underPath } from './problem.ts';
 import type { Problem } from './problem.ts';
 import type { Above, Arch, Job, Load, Profile, Scheme } from './schema.ts';
 import { shown } from './shown.ts';
+import { supportProblems } from './support-relations.ts';
 
 type Opening = NonNullable<Above['openings']>[number];
 
@@ -37,6 +38,9 @@ function schemeProblems(scheme: Scheme): Problem[] {
   return [
     ...profileProblems(profile),
     ...each('above.openings', above?.openings ?? [], openingProblems),
+    ...underPath('supports.left', supportProblems(scheme.supports?.left)),
+    ...underPath('supports.right', supportProblems(scheme.supports?.right)),
+    ...repeatedIds('ties', scheme.ties ?? []),
     ...repeatedIds('loads', loads),
     ...each('loads', loads, loadProblems),
     ...repeatedIds('combinations', combinations),

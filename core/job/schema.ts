@@ -7,33 +7,15 @@
  * file from a newer minor edition loses nothing here.
  */
 import * as v from 'valibot';
+import { finite, id, length, LIMITS, notNegative, place, positive, text, within } from './schema-parts.ts';
+import { supportSchema } from './support-schema.ts';
+import { tieSchema } from './tie-schema.ts';
+
+export { LIMITS };
 
 export const JOB_FORMAT = 'skewback.job';
 export const JOB_VERSION = 1;
 
-/** Upper limits that keep a hostile or mistaken file from costing minutes or memory. */
-export const LIMITS = {
-  /** Voussoirs in one ring; the solver is linear in them, the drawing is not meant for more. */
-  voussoirs: 100_000,
-  arches: 200,
-  schemes: 200,
-  loads: 5_000,
-  marks: 5_000,
-  points: 20_000,
-  text: 20_000,
-  /** Any length, m, and any force or intensity, kN. */
-  length: 1_000,
-  force: 1e7,
-} as const;
-
-const text = v.pipe(v.string(), v.maxLength(LIMITS.text));
-const finite = v.pipe(v.number(), v.finite());
-const positive = (max: number) => v.pipe(v.number(), v.finite(), v.gtValue(0), v.maxValue(max));
-const notNegative = (max: number) => v.pipe(v.number(), v.finite(), v.minValue(0), v.maxValue(max));
-const within = (limit: number) => v.pipe(v.number(), v.finite(), v.minValue(-limit), v.maxValue(limit));
-const length = positive(LIMITS.length);
-const place = within(LIMITS.length);
-const id = v.pipe(v.string(), v.minLength(1), v.maxLength(200));
 const point = v.strictTuple([place, place]);
 
 const span = { span: length, step: v.optional(place) };
@@ -214,7 +196,7 @@ export const crackSchema = v.looseObject({
   notes: v.optional(text),
 });
 
-export const supportSchema = v.looseObject({ kind: v.picklist(['rigid']) });
+const safetyFactor = v.optional(v.pipe(finite, v.minValue(1), v.maxValue(100)));
 
 export const schemeSchema = v.looseObject({
   id,
@@ -230,11 +212,20 @@ export const schemeSchema = v.looseObject({
   /** Horizontal acceleration as a share of gravity, + to the right. */
   sway: v.optional(within(10)),
   supports: v.optional(v.looseObject({ left: v.optional(supportSchema), right: v.optional(supportSchema) })),
+  ties: v.optional(v.pipe(v.array(tieSchema), v.maxLength(LIMITS.ties))),
   combinations: v.optional(v.pipe(v.array(combinationSchema), v.maxLength(LIMITS.marks))),
   road: v.optional(roadSchema),
   cracks: v.optional(v.pipe(v.array(crackSchema), v.maxLength(LIMITS.marks))),
   /** What the assessor asks for beyond standing; a ring that holds with less is called narrow. */
-  asked: v.optional(v.looseObject({ geometricSafety: v.optional(v.pipe(finite, v.minValue(1), v.maxValue(100))) })),
+  asked: v.optional(
+    v.looseObject({
+      geometricSafety: safetyFactor,
+      /** Of the supports about their toe: resisting moment over overturning moment. */
+      overturning: safetyFactor,
+      /** Of the supports on the ground: resistance over the force that drives them. */
+      baseSliding: safetyFactor,
+    }),
+  ),
 });
 
 export const archSchema = v.looseObject({
@@ -281,3 +272,4 @@ export type Road = Deep<v.InferOutput<typeof roadSchema>>;
 export type Crack = Deep<v.InferOutput<typeof crackSchema>>;
 export type Load = Deep<v.InferOutput<typeof loadSchema>>;
 export type Support = Deep<v.InferOutput<typeof supportSchema>>;
+export type Tie = Deep<v.InferOutput<typeof tieSchema>>;

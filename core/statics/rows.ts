@@ -31,6 +31,17 @@ function momentRows(system: RingSystem, columns: readonly Sums[]): Rows {
   return { unknowns: d, count, a, b };
 }
 
+/** Rows of the same unknowns, the first before the second. */
+export function joined(first: Rows, second: Rows): Rows {
+  const a = new Float64Array(first.a.length + second.a.length);
+  a.set(first.a);
+  a.set(second.a, first.a.length);
+  const b = new Float64Array(first.b.length + second.b.length);
+  b.set(first.b);
+  b.set(second.b, first.b.length);
+  return { unknowns: first.unknowns, count: first.count + second.count, a, b };
+}
+
 export const hingeOfRow = (row: number): Hinge => ({ joint: row >> 1, side: row % 2 === 0 ? 'extrados' : 'intrados' });
 
 /** The hinges of a basis or certificate, left to right, with their relative rotations. */

@@ -1,7 +1,7 @@
 /** Least and greatest thrust of a ring whose joints take no tension, may slide and may crush. */
 import { crushingLimit, minimiseUncrushed } from './crushing.ts';
-import { minimise, type Rows, type SimplexOutcome } from './hinge-simplex.ts';
-import { lineRows } from './rows.ts';
+import { minimise, type SimplexOutcome } from './hinge-simplex.ts';
+import { joined, lineRows } from './rows.ts';
 import { slidingRows } from './sliding.ts';
 import type { RingSystem } from './system.ts';
 
@@ -34,14 +34,4 @@ export function usableThrust(system: RingSystem, limits: JointLimits): UsableThr
   const horizontal = (outcome: SimplexOutcome): number | null =>
     outcome.kind === 'optimal' ? (outcome.s[0] as number) * system.frame.force : null;
   return { least: horizontal(least), greatest: horizontal(greatest) };
-}
-
-function joined(first: Rows, second: Rows): Rows {
-  const a = new Float64Array(first.a.length + second.a.length);
-  a.set(first.a);
-  a.set(second.a, first.a.length);
-  const b = new Float64Array(first.b.length + second.b.length);
-  b.set(first.b);
-  b.set(second.b, first.b.length);
-  return { unknowns: first.unknowns, count: first.count + second.count, a, b };
 }
