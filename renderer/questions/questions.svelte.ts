@@ -5,7 +5,7 @@ import { movedRing } from '../../core/drawing/moved-ring.ts';
 import type { Point } from '../../core/geometry/point.ts';
 import { figure, metres } from '../../core/quantity/figures.ts';
 import type { Session } from '../session/session.svelte.ts';
-import type { Spread, SpreadStep } from '../work/answers.ts';
+import { placementsAt, type Spread, type SpreadStep } from '../work/answers.ts';
 import { openDesk, type Desk } from '../work/desk.ts';
 import { LongQuestion } from '../work/long-question.svelte.ts';
 import { ChosenThrust } from './chosen-thrust.svelte.ts';
@@ -84,7 +84,12 @@ export class Questions {
     const { spreadStep: step } = this;
     return step === null
       ? {}
-      : { moved: { ring: movedRing(assessed, step), label: `springings ${metres(step.moved)} m further apart` } };
+      : {
+          moved: {
+            ring: movedRing(assessed, placementsAt(step)),
+            label: `springings ${metres(step.moved)} m further apart`,
+          },
+        };
   }
 
   #pattern(): Overlays {

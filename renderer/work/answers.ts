@@ -9,7 +9,22 @@ import type { SpreadPlace } from '../../core/statics/remaining-spread.ts';
 export type Told = (share: number) => void;
 
 /** A place on the way, without the joints, which follow from the placements. */
-export type SpreadStep = Omit<SpreadPlace, 'joints'>;
+export interface SpreadStep extends Pick<SpreadPlace, 'moved' | 'horizontal' | 'hinges'> {
+  /** Four figures for each part, from the left support to the right: cosine, sine, dx, dy. A long ring has many. */
+  readonly packed: Float64Array;
+}
+
+const packed = (placements: SpreadPlace['placements']): Float64Array =>
+  Float64Array.from(placements.flatMap(({ cos, sin, dx, dy }) => [cos, sin, dx, dy]));
+
+/** The placements of a place, as the drawing takes them. */
+export function placementsAt({ packed: figures }: SpreadStep): Pick<SpreadPlace, 'placements'> {
+  const placements = Array.from({ length: figures.length / 4 }, (_, part) => {
+    const [cos, sin, dx, dy] = figures.subarray(4 * part, 4 * part + 4) as unknown as [number, number, number, number];
+    return { cos, sin, dx, dy };
+  });
+  return { placements };
+}
 
 export interface Spread {
   readonly places: readonly SpreadStep[];
@@ -37,7 +52,7 @@ export const longAnswers = {
       moved,
       horizontal,
       hinges,
-      placements,
+      packed: packed(placements),
     }));
     return { places, collapse: answer.collapse, furthest };
   },

@@ -10,6 +10,13 @@ const leaf = (page: Page, name: string) => page.getByRole('tab', { name, exact: 
 const panel = (page: Page) => page.getByRole('tabpanel');
 const undo = (page: Page) => page.getByRole('button', { name: 'Undo' });
 
+test('an arch that does not stand leads from its finding to its fall', async ({ page }) => {
+  await openSample(page, 'harrowmere-chapel-west-bay');
+  await page.getByRole('button', { name: 'See how it falls' }).click();
+  await expect(page.getByRole('tab', { name: 'Movement' })).toHaveAttribute('aria-selected', 'true');
+  await expect(page.getByRole('tab', { name: 'Movement' })).toBeFocused();
+});
+
 async function openSample(page: Page, name: string): Promise<void> {
   const buffer = await readFile(`assets/samples/${name}.json`);
   const chooser = page.waitForEvent('filechooser');
@@ -63,9 +70,9 @@ test('the fall of an arch that does not stand is played, stopped and wound by ha
   await leaf(page, 'Movement');
   const film = page.getByRole('slider', { name: /^Movement/ });
   await film.press('Home');
-  await page.getByRole('button', { name: 'Play' }).click();
+  await page.getByRole('button', { name: 'Play', exact: true }).click();
   await expect.poll(() => film.inputValue().then(Number)).toBeGreaterThan(0.1);
-  await page.getByRole('button', { name: 'Stop' }).click();
+  await page.getByRole('button', { name: 'Stop', exact: true }).click();
   const stopped = await film.inputValue();
   await page.waitForTimeout(200);
   expect(await film.inputValue()).toBe(stopped);
@@ -78,7 +85,7 @@ test('with reduced motion the fall can only be wound by hand', async ({ page }) 
   await openSample(page, 'harrowmere-chapel-west-bay');
   await leaf(page, 'Movement');
   await expect(page.getByRole('slider', { name: /^Movement/ })).toBeVisible();
-  await expect(page.getByRole('button', { name: 'Play' })).toBeHidden();
+  await expect(page.getByRole('button', { name: 'Play', exact: true })).toBeHidden();
 });
 
 test('the spread until it falls: found beside the page, looked through, and put away by an edit', async ({ page }) => {
