@@ -138,7 +138,7 @@ test('three cracks are marked on the board, read, shown and undone', async ({ pa
   await page.mouse.click(right.x + thick * 0.72, right.y - thick * 0.52);
   await page.mouse.click(crown.x + thick * 0.68, crown.y + 4);
   await expect(page.getByRole('group', { name: /^Mark \d/ })).toHaveCount(3);
-  await page.getByRole('button', { name: 'Done marking' }).click();
+  await page.getByRole('button', { name: 'Done', exact: true }).click();
   await expect(page.getByTestId('verdict')).toContainText('The marks speak for the springings having spread apart');
   await page.getByRole('button', { name: /^Best/ }).hover();
   await expect(page.getByRole('list', { name: 'Legend' })).toContainText('Ring before the movement');
