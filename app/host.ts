@@ -76,6 +76,20 @@ export interface Drafts {
   discard(id: string): Promise<void>;
 }
 
+/** One earlier save of a file. */
+export interface KeptSave {
+  /** ISO 8601, UTC. */
+  readonly savedAt: string;
+  readonly bytes: Uint8Array;
+}
+
+/** The last saves of each file, so that one can go back to what it held. */
+export interface KeptSaves {
+  keep(file: FileRef, bytes: Uint8Array): Promise<void>;
+  /** Latest first. */
+  list(file: FileRef): Promise<readonly KeptSave[]>;
+}
+
 /** What a shell's own menu can ask of the page. */
 export type Command =
   'new' | 'open' | 'save' | 'save-as' | 'export' | 'print' | 'undo' | 'redo' | 'zoom-in' | 'zoom-out' | 'zoom-to-fit';
@@ -117,6 +131,13 @@ export interface Host {
   readonly exportFiles?: (files: readonly ExportedFile[]) => Promise<Outcome<string>>;
   readonly recent?: RecentFiles;
   readonly drafts?: Drafts;
+  readonly saves?: KeptSaves;
+  /** A file dropped onto the window. A browser finds by its item where the file can be written again. */
+  readonly dropped?: (file: File, item?: DataTransferItem) => Promise<Outcome<OpenedFile>>;
+  /** Whether something else has written the file since it was read or written here. */
+  readonly changedSince?: (file: FileRef) => Promise<boolean>;
+  /** Tells whether other windows have the file open, whenever that changes. */
+  readonly watchOthers?: (file: FileRef, listener: (others: boolean) => void) => Unlisten;
   readonly print?: () => Promise<Outcome<null>>;
   /**
    * A file opened from outside: double-clicked, or given on the command line. One that came before the page was

@@ -5,24 +5,19 @@
 import { fileOpen, fileSave, supported } from 'browser-fs-access';
 import { version } from '../../package.json';
 import type { FileRef, Host, OpenedFile, Outcome } from '../../app/host.ts';
+import { browserDrafts } from './drafts.ts';
+import { changedSince, handleOf, markSeen, reference } from './handles.ts';
+import { watchOthers } from './others.ts';
+import { browserRecent, noteRecent } from './recent.ts';
+import { keptSaves } from './saves.ts';
 
 const JOB_KINDS = {
   description: 'Skewback job',
   extensions: ['.skewback', '.json'],
   mimeTypes: ['application/x-skewback', 'application/json'],
 };
-const NEW_JOB_KIND = { description: 'Skewback job', extensions: ['.skewback'], mimeTypes: ['application/x-skewback'] };
-
-/** Files that the browser lets this page write again, by the id of their reference. */
-const handles = new Map<string, FileSystemFileHandle>();
-let count = 0;
-
-function reference(name: string, handle: FileSystemFileHandle | null | undefined): FileRef {
-  count += 1;
-  const id = String(count);
-  if (handle) handles.set(id, handle);
-  return { id, name, folder: '' };
-}
+const JOB_TYPE = 'application/x-skewback';
+const NEW_JOB_KIND = { description: 'Skewback job', extensions: ['.skewback'], mimeTypes: [JOB_TYPE] };
 
 async function settled<Value>(work: () => Promise<Value>, failure: string): Promise<Outcome<Value>> {
   try {
@@ -43,24 +38,44 @@ function reasonOf(error: unknown): string {
 
 const blobOf = (bytes: Uint8Array, type: string): Blob => new Blob([bytes.slice()], { type });
 
+/** A convenience that must not stand in the way of the file itself. */
+const remember = (name: string, handle: FileSystemFileHandle | null | undefined): void => {
+  if (handle) noteRecent(name, handle).catch(() => undefined);
+};
+
+async function opened(file: File, handle: FileSystemFileHandle | null | undefined): Promise<OpenedFile> {
+  remember(file.name, handle);
+  const bytes = new Uint8Array(await file.arrayBuffer());
+  return { file: reference(file.name, handle, file.lastModified), bytes };
+}
+
 async function openFile(): Promise<OpenedFile> {
   const chosen = await fileOpen(JOB_KINDS);
-  return { file: reference(chosen.name, chosen.handle), bytes: new Uint8Array(await chosen.arrayBuffer()) };
+  return opened(chosen, chosen.handle);
+}
+
+interface Dropped {
+  getAsFileSystemHandle?: () => Promise<FileSystemHandle | null>;
+}
+
+async function openDropped(file: File, item: (DataTransferItem & Dropped) | undefined): Promise<OpenedFile> {
+  const found = await item?.getAsFileSystemHandle?.().catch(() => null);
+  return opened(file, found instanceof FileSystemFileHandle ? found : null);
 }
 
 async function writeNew(fileName: string, bytes: Uint8Array): Promise<FileRef> {
-  const handle = await fileSave(blobOf(bytes, 'application/x-skewback'), { ...NEW_JOB_KIND, fileName });
-  return reference(handle?.name ?? fileName, handle);
+  const handle = await fileSave(blobOf(bytes, JOB_TYPE), { ...NEW_JOB_KIND, fileName });
+  const file = reference(handle?.name ?? fileName, handle);
+  await markSeen(file);
+  remember(file.name, handle);
+  return file;
 }
 
 async function writeAgain(file: FileRef, bytes: Uint8Array): Promise<FileRef> {
-  const handle = handles.get(file.id);
-  await fileSave(
-    blobOf(bytes, 'application/x-skewback'),
-    { ...NEW_JOB_KIND, fileName: file.name },
-    handle ?? null,
-    true,
-  );
+  const handle = handleOf(file);
+  await fileSave(blobOf(bytes, JOB_TYPE), { ...NEW_JOB_KIND, fileName: file.name }, handle, true);
+  await markSeen(file);
+  remember(file.name, handle);
   return file;
 }
 
@@ -85,4 +100,10 @@ export const browserHost = {
     settled(() => writeAgain(file, bytes), `${file.name} could not be saved; it is still as it was.`),
   saveAs: (suggestedName, bytes) => settled(() => writeNew(suggestedName, bytes), 'The file could not be saved.'),
   exportFile: ({ name, mime, bytes }) => settled(() => exportFile(name, mime, bytes), `${name} could not be written.`),
+  ...(supported ? { recent: browserRecent } : {}),
+  drafts: browserDrafts,
+  saves: keptSaves,
+  dropped: (file, item) => settled(() => openDropped(file, item), `${file.name} could not be opened.`),
+  changedSince,
+  watchOthers,
 } satisfies Host;

@@ -7,6 +7,8 @@ export interface OpenDocument {
   readonly photographs: Photographs;
   /** Null for a document that no file holds. */
   readonly file: FileRef | null;
+  /** The job is not what the file holds: unsaved work that was kept aside. */
+  readonly unsaved?: true;
 }
 
 export const NO_PHOTOGRAPHS: Photographs = new Map();

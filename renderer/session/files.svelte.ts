@@ -1,8 +1,9 @@
 /** Documents between session and shell: new, open, save, export; and what the person must be told or asked on the way. */
-import type { ExportedFile, Host, OpenedFile, Outcome } from '../../app/host.ts';
+import type { Draft, ExportedFile, FileRef, Host, KeptSave, OpenedFile, Outcome } from '../../app/host.ts';
 import { readJobFile, writeJobFile } from '../../core/job/archive.ts';
 import type { DrawnShape } from '../../core/job/edits.ts';
 import { freshJob } from '../../core/job/fresh.ts';
+import type { Job } from '../../core/job/schema.ts';
 import { problemSentence } from '../../core/job/problem.ts';
 import { NO_PHOTOGRAPHS } from './document.ts';
 import { jobFileName } from './names.ts';
@@ -16,6 +17,7 @@ export interface Notice {
 }
 
 export type UnsavedAnswer = 'save' | 'discard' | 'stay';
+export type ClashAnswer = 'over' | 'copy' | 'stay';
 
 /** Beyond these, the rest of a file's problems are counted. */
 const MOST_DETAILS = 8;
@@ -24,6 +26,8 @@ export class Files {
   notice = $state.raw<Notice | null>(null);
   /** Set while the person is asked what to do with unsaved work. */
   question = $state.raw<((answer: UnsavedAnswer) => void) | null>(null);
+  /** Set while the person is asked what to do about a file that something else has written meanwhile. */
+  clash = $state.raw<((answer: ClashAnswer) => void) | null>(null);
   readonly #session: Session;
   readonly #host: Host;
 
@@ -48,6 +52,29 @@ export class Files {
     if (opened.kind !== 'done' || (await this.mayLeave())) this.take(opened);
   }
 
+  async openRecent(file: FileRef): Promise<void> {
+    const { recent } = this.#host;
+    if (recent === undefined || !(await this.mayLeave())) return;
+    const opened = await recent.open(file);
+    // What cannot be opened any more need not be offered again.
+    if (opened.kind === 'failed') await recent.forget(file);
+    this.take(opened);
+  }
+
+  /** Opens work that was kept aside. `recover` puts it in place, or says why it cannot. */
+  async recover(draft: Draft, recover: (draft: Draft) => string | null): Promise<void> {
+    if (!(await this.mayLeave())) return;
+    const text = recover(draft);
+    this.notice = text === null ? null : { kind: 'problem', text, details: [] };
+  }
+
+  /** Back to what an earlier save held, as one more step. `when` is how the person knows that save. */
+  restore({ bytes }: KeptSave, when: string): void {
+    const reading = readJobFile(bytes);
+    if (reading.ok) this.#session.editJob(`back to the save of ${when}`, () => reading.job);
+    else this.notice = { kind: 'problem', text: `The save of ${when} can no longer be read.`, details: [] };
+  }
+
   take(opened: Outcome<OpenedFile>): void {
     const found = this.#settled(opened);
     if (found === null) return;
@@ -68,18 +95,22 @@ export class Files {
   async save(): Promise<boolean> {
     const { file, settled, photographs } = this.#session;
     if (file === null) return this.saveAs();
+    if (await this.#host.changedSince?.(file)) {
+      const answer = await new Promise<ClashAnswer>((resolve) => {
+        this.clash?.('stay');
+        this.clash = resolve;
+      });
+      this.clash = null;
+      if (answer !== 'over') return answer === 'copy' && this.saveAs();
+    }
     const bytes = writeJobFile(settled, photographs);
-    const saved = this.#settled(await this.#host.save(file, bytes));
-    if (saved !== null) this.#saved(settled, saved);
-    return saved !== null;
+    return this.#saved(settled, bytes, await this.#host.save(file, bytes));
   }
 
   async saveAs(): Promise<boolean> {
     const { file, settled, photographs } = this.#session;
     const bytes = writeJobFile(settled, photographs);
-    const saved = this.#settled(await this.#host.saveAs(file?.name ?? jobFileName(settled), bytes));
-    if (saved !== null) this.#saved(settled, saved);
-    return saved !== null;
+    return this.#saved(settled, bytes, await this.#host.saveAs(file?.name ?? jobFileName(settled), bytes));
   }
 
   async export(file: ExportedFile): Promise<void> {
@@ -98,9 +129,14 @@ export class Files {
     return answer === 'save' ? this.save() : answer === 'discard';
   }
 
-  #saved(job: Parameters<Session['kept']>[0], file: Parameters<Session['kept']>[1]): void {
+  #saved(job: Job, bytes: Uint8Array, outcome: Outcome<FileRef>): boolean {
+    const file = this.#settled(outcome);
+    if (file === null) return false;
     this.#session.kept(job, file);
     this.notice = { kind: 'done', text: `Saved as ${file.name}.`, details: [] };
+    // Earlier saves are a convenience; the file itself is written.
+    this.#host.saves?.keep(file, bytes).catch(() => undefined);
+    return true;
   }
 
   /** The value of what went well; a failure is told, a closed dialog is not. */

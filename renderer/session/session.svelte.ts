@@ -55,11 +55,11 @@ export class Session {
   readonly toRedo: string | null = $derived(stepToRedo(this.#history));
 
   /** Puts another document in the place of this one, with a history of its own. */
-  open({ job, photographs, file }: OpenDocument): void {
+  open({ job, photographs, file, unsaved }: OpenDocument): void {
     this.opened += 1;
     this.#history = historyOf(job);
     this.#preview = null;
-    this.#kept = job;
+    this.#kept = unsaved === true ? null : job;
     this.#place = NOWHERE;
     this.photographs = photographs;
     this.file = file;
