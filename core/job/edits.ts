@@ -8,4 +8,6 @@ export * from './edits/opening.ts';
 export * from './edits/ring-details.ts';
 export * from './edits/ring.ts';
 export * from './edits/road.ts';
+export * from './edits/supports.ts';
+export * from './edits/ties.ts';
 export type { Patch } from './edits/patch.ts';

@@ -16,7 +16,7 @@ export interface Capacity {
 
 export function thrustCapacity(body: Body, push: Push): Capacity {
   const { least, greatest, governs } = wholeRange(body, push);
-  if (!(least <= greatest)) return { whole: null, cracked: null, governs };
+  if (!(least <= greatest) || greatest === -Infinity) return { whole: null, cracked: null, governs };
   return { whole: { least, greatest }, cracked: crackedGreatest(body, push, least, greatest), governs };
 }
 

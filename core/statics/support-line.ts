@@ -4,7 +4,7 @@
  * Masonry that takes no tension opens where the line leaves the middle third, and what stands on the open side of the
  * crack no longer helps: a leaning buttress loses a wedge of its masonry. Each bed is solved for the edge of its
  * compressed part with the masonry on the open side left out, from the top down (S. Huerta 2010; J. A. Ochsendorf,
- * J. I. Hernando & S. Huerta 2004; from memory). What the crack has once parted stays parted.
+ * J. I. Hernando & S. Huerta 2004; from memory). Masonry left out bears again where a bed below is pressed on that side.
  */
 import type { BedForce, Body, Push, Slice } from './support-body.ts';
 
@@ -62,36 +62,73 @@ export function crackedLine(body: Body, push: Push): SupportLine {
 /** Whether the body stands with the wedge left out. */
 export const standsCracked = (body: Body, push: Push): boolean => followCrack(body, push, null).fallsAt === null;
 
+/** Weight, kN, and its moment about u = 0. */
+interface Weight {
+  readonly weight: number;
+  readonly moment: number;
+}
+
+const NONE: Weight = { weight: 0, moment: 0 };
+const sum = (p: Weight, q: Weight): Weight => ({ weight: p.weight + q.weight, moment: p.moment + q.moment });
+
 /** @param beds filled with the bed of each slice where a list is given. */
 function followCrack(body: Body, push: Push, beds: Bed[] | null): Pick<SupportLine, 'fallsAt' | 'wedge'> {
-  let weight = 0;
-  let weightMoment = 0;
-  let wedge = 0;
+  let pressing = NONE;
+  // left out on the open side of a crack, in front and behind
+  let inFront = NONE;
+  let behind = NONE;
   let from = -Infinity;
   let to = Infinity;
   let above: Slice | null = null;
   for (let i = 0; i < body.slices.length; i++) {
     const slice = body.slices[i] as Slice;
     const { front, back } = slice;
+    const others = body.others[i] as BedForce;
+    const lean = leanOf(slice, others, push, sum(pressing, sum(inFront, behind)));
+    // what stands on the pressed side bears again
+    if (lean !== 'outwards') {
+      pressing = sum(pressing, inFront);
+      inFront = NONE;
+      from = front;
+    }
+    if (lean !== 'inwards') {
+      pressing = sum(pressing, behind);
+      behind = NONE;
+      to = back;
+    }
     // an edge that has not opened follows the face of the course, set-off or not
     from = above === null || from <= above.front ? front : Math.min(Math.max(from, front), back);
     to = above === null || to >= above.back ? back : Math.min(Math.max(to, from), back);
-    const others = body.others[i] as BedForce;
-    const start = startOf(slice, others, push, weight, weightMoment, from, to);
-    const end = compressedEnd(start);
+    const start = startOf(slice, others, push, pressing.weight, pressing.moment, from, to);
+    const end = lean === 'whole' ? ([front, back] as const) : opened(start, lean === 'outwards' ? 1 : -1);
     if (end === null) {
-      beds?.push(bedUnder(start, { weight: 0, moment: 0 }, push, others));
-      return { fallsAt: i, wedge };
+      beds?.push(bedUnder(start, NONE, push, others));
+      return { fallsAt: i, wedge: inFront.weight + behind.weight };
     }
     const own = counted(start, end[0], end[1]);
-    weight += own.weight;
-    weightMoment += own.moment;
-    wedge += Math.max(0, slice.unitWeight * slice.breadth * (back - front) * (slice.bottom - slice.top) - own.weight);
-    beds?.push(bedUnder(start, own, push, others));
+    const whole = counted({ ...start, from: front, to: back }, front, back);
+    const parted = { weight: whole.weight - own.weight, moment: whole.moment - own.moment };
+    if (lean === 'outwards') inFront = sum(inFront, parted);
+    if (lean === 'inwards') behind = sum(behind, parted);
+    pressing = sum(pressing, own);
+    beds?.push(bedUnder(startOf(slice, others, push, pressing.weight, pressing.moment, from, to), NONE, push, others));
     [from, to] = end;
     above = slice;
   }
-  return { fallsAt: null, wedge };
+  return { fallsAt: null, wedge: inFront.weight + behind.weight };
+}
+
+/** Which way the lower bed of a slice opens with all the masonry over it counted. */
+function leanOf(slice: Slice, others: BedForce, push: Push, over: Weight): 'whole' | 'outwards' | 'inwards' {
+  const { front, back } = slice;
+  const start = startOf(slice, others, push, over.weight, over.moment, front, back);
+  const own = counted(start, front, back);
+  const normal = start.normal + own.weight;
+  const moment = start.moment + own.moment;
+  const depth = back - front;
+  const off = moment - ((front + back) / 2) * normal;
+  if (depth > 0 && normal > 0 && Math.abs(off) <= (normal * depth) / 6) return 'whole';
+  return off >= 0 ? 'outwards' : 'inwards';
 }
 
 function startOf(
@@ -112,7 +149,7 @@ function startOf(
   };
 }
 
-const bedUnder = (start: Start, own: { weight: number; moment: number }, push: Push, others: BedForce): Bed =>
+const bedUnder = (start: Start, own: Weight, push: Push, others: BedForce): Bed =>
   bedOf(start.slice, start.normal + own.weight, push.horizontal + others.shear, start.moment + own.moment);
 
 interface Start {
@@ -126,7 +163,7 @@ interface Start {
 }
 
 /** Weight between the edges at the upper bed and those at the lower, kN, and its moment about u = 0. */
-function counted({ from: a0, to: b0, slice }: Start, a1: number, b1: number): { weight: number; moment: number } {
+function counted({ from: a0, to: b0, slice }: Start, a1: number, b1: number): Weight {
   const k = slice.unitWeight * slice.breadth * (slice.bottom - slice.top);
   return {
     weight: (k * (b0 - a0 + b1 - a1)) / 2,
@@ -139,22 +176,6 @@ const MOST_STEPS = 30;
 /** Share of the depth that is rounding only. */
 const SAME = 1e-12;
 
-/** The compressed part of the lower bed with what stands outside it left out; null where none is left. */
-function compressedEnd(start: Start): readonly [number, number] | null {
-  const { front, back } = start.slice;
-  const depth = back - front;
-  if (!(depth > 0)) return null;
-  // both edges follow plumb from the upper bed, then the faces, where the line allows
-  const own = counted(start, front, back);
-  const normal = start.normal + own.weight;
-  if (!(normal > 0)) return null;
-  const at = (start.moment + own.moment) / normal;
-  if (at >= back || at <= front) return null;
-  if (at - front > (2 * depth) / 3) return opened(start, 1);
-  if (back - at > (2 * depth) / 3) return opened(start, -1);
-  return [front, back];
-}
-
 /**
  * The edge a of the compressed part for which the resultant of what lies behind it stands a third of that part from
  * the pressed face: (p − a) N(a) = 3 (p N(a) − M(a)), p the pressed face. Newton's method from the whole bed on.
@@ -163,6 +184,7 @@ function compressedEnd(start: Start): readonly [number, number] | null {
 function opened(start: Start, outwards: 1 | -1): readonly [number, number] | null {
   const { slice } = start;
   const { front, back } = slice;
+  if (!(back > front)) return null;
   const pressed = outwards === 1 ? back : front;
   const open = outwards === 1 ? front : back;
   const upper = outwards === 1 ? start.from : start.to;
