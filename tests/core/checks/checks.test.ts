@@ -11,6 +11,7 @@ describe('ring in compression alone', () => {
     thickness: 0.4,
     share: 0.4,
     endlessThrust: false,
+    altered: false,
     joints: [0, 6, 10],
     askedSafety: 2,
   };
