@@ -28,7 +28,7 @@ export interface Shortcut {
   readonly action: Action;
   readonly name: string;
   readonly group: KeyGroup;
-  /** `mod` is Ctrl, or the command key of a Mac. A plain key counts only where nothing is being typed. */
+  /** `mod` is Ctrl, or the command key of a Mac. A plain figure or mark counts only where nothing is being typed. */
   readonly held: 'plain' | 'mod' | 'mod+shift' | 'alt';
   /** As the event names it, in lower case; with Alt the key's place on the board, since Alt may write another letter. */
   readonly key: string;
@@ -117,7 +117,7 @@ const isSingle = ({ held, key }: Shortcut): boolean => held === 'plain' && key.l
 export function actionOf(event: KeyboardEvent, shell: Shell): Action | null {
   const typing = event.target instanceof HTMLElement && event.target.matches('input, textarea, select');
   const found = SHORTCUTS.filter(inShell(shell)).find((shortcut) => {
-    if (shortcut.held === 'plain' && (typing || (isSingle(shortcut) && !singleKeys.on))) return false;
+    if (isSingle(shortcut) && (typing || !singleKeys.on)) return false;
     return isHeld(shortcut, event) && isKey(shortcut, event);
   });
   return found?.action ?? null;
