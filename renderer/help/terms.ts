@@ -185,7 +185,10 @@ const TERM_OF_PATH: Readonly<Record<string, TermId>> = {
 /** The word that explains a field; null for one that explains itself. */
 export const termOfField = (path: string): TermId | null => TERM_OF_PATH[path] ?? null;
 
-export interface Part { readonly text: string; readonly term: TermId | null }
+export interface Part {
+  readonly text: string;
+  readonly term: TermId | null;
+}
 
 const SPELLINGS = new Map(TERMS.flatMap(({ id, marked }) => marked.map((spelling) => [spelling, id] as const)));
 const LONGEST_FIRST = [...SPELLINGS.keys()].sort((a, b) => b.length - a.length);
