@@ -19,7 +19,7 @@ const pullAt = (scheme: Scheme, thickness: number): number =>
   leastPull(assessed({ ...scheme, ring: { ...scheme.ring, thickness } }).model, 1);
 
 describe('thinnest ring', () => {
-  const cases = randomSchemes(30, 61)
+  const cases = randomSchemes(46, 61)
     // a load near a springing stands beside a thinner ring, and lost mortar may leave it nothing: both are refused
     .map(({ ring: { thickness, voussoirs, joints }, loads, ...scheme }): Scheme => ({
       ...scheme,
@@ -40,7 +40,7 @@ describe('thinnest ring', () => {
       expect(pullAt(scheme, thinnest * (1 + CLOSE)), JSON.stringify(scheme)).toBeLessThan(0);
       expect(pullAt(scheme, thinnest * (1 - CLOSE)), JSON.stringify(scheme)).toBeGreaterThan(0);
     }
-    expect(asked).toBeGreaterThan(200);
+    expect(asked).toBeGreaterThan(300);
   });
 
   test('nothing thinner stands', () => {
