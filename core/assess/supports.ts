@@ -4,17 +4,17 @@ import type { SupportSide } from '../checks/support-depth.ts';
 import { supportChecks, unaskedSupport } from '../checks/supports.ts';
 import type { Point } from '../geometry/point.ts';
 import type { ResolvedBody } from '../job/support-defaults.ts';
-import { lineOfThrust, type State } from '../statics/line.ts';
+import type { State } from '../statics/line.ts';
 import { baseOf } from '../statics/support-base.ts';
 import { supportBody, type Body, type Push } from '../statics/support-body.ts';
 import { thrustCapacity } from '../statics/support-capacity.ts';
 import { enough, type EnoughAnswers } from '../statics/support-enough.ts';
 import { crackedLine, wholeLine, type Bed, type SupportLine } from '../statics/support-line.ts';
+import { pushAtSpringing } from '../statics/support-push.ts';
 import { standTogether } from '../statics/support-rows.ts';
 import { thrustRange, type ThrustAnswer } from '../statics/thrust.ts';
 import type { BuiltScheme } from './build.ts';
 import type { BedAnswer, SupportAnswer, SupportState } from './holding-answers.ts';
-import { springingForces } from './printed.ts';
 import { tiesTogether, type TiesTogether } from './ties.ts';
 
 export interface SupportsTogether {
@@ -128,20 +128,12 @@ const finite = (value: number | null | undefined): number | null =>
 
 /** The push of the arch, and what is left of it when the ties have taken theirs; null where it crosses nowhere. */
 function pushOf(
-  { built, side, body, springing, outwards }: Place,
+  { built, side, body, springing }: Place,
   state: State,
   ties: TiesTogether | null,
 ): { arch: Push; net: Push } | null {
-  const { system, joints } = built;
-  const extreme = { horizontal: 0, state: Float64Array.from(state), hinges: [] };
-  const { [side]: force } = springingForces(system, extreme, lineOfThrust(system, joints, state));
-  if (force.at === null) return null;
-  const arch: Push = {
-    horizontal: force.horizontal,
-    vertical: force.vertical,
-    u: outwards * (force.at.x - springing.x),
-    z: springing.y - force.at.y,
-  };
+  const arch = pushAtSpringing(built.system, built.joints, state, side, springing);
+  if (arch === null) return null;
   const relief = Math.max(0, arch.horizontal) * (ties?.held ?? 0);
   if (relief === 0) return { arch, net: arch };
   const even = evenThrust(body, arch);

@@ -50,8 +50,8 @@ function wholeRange(body: Body, push: Push): { least: number; greatest: number; 
   return { least, greatest, governs };
 }
 
-/** Halvings: the range to one part in 10⁹. */
-const HALVINGS = 30;
+/** Halvings: the range to some parts in 10⁸. */
+const HALVINGS = 26;
 /** Places tried for a thrust that stands, from the least to the greatest as one piece. */
 const TRIALS = 8;
 

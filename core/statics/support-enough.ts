@@ -115,7 +115,7 @@ function enoughDepth(holding: Holding): Enough {
 }
 
 /** Every course and the footing deeper at the back by so much, m. */
-export function deeper(support: ResolvedBody, more: number): ResolvedBody {
+function deeper(support: ResolvedBody, more: number): ResolvedBody {
   const { courses, footing } = support;
   return {
     ...support,

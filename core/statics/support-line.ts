@@ -64,19 +64,30 @@ export const standsCracked = (body: Body, push: Push): boolean => followCrack(bo
 
 /** Weight, kN, and its moment about u = 0. */
 interface Weight {
-  readonly weight: number;
-  readonly moment: number;
+  weight: number;
+  moment: number;
 }
 
-const NONE: Weight = { weight: 0, moment: 0 };
-const sum = (p: Weight, q: Weight): Weight => ({ weight: p.weight + q.weight, moment: p.moment + q.moment });
+const NONE: Readonly<Weight> = { weight: 0, moment: 0 };
+
+function add(sum: Weight, more: Readonly<Weight>): void {
+  sum.weight += more.weight;
+  sum.moment += more.moment;
+}
+
+/** Takes all of one sum over into another. */
+function move(from: Weight, to: Weight): void {
+  add(to, from);
+  from.weight = 0;
+  from.moment = 0;
+}
 
 /** @param beds filled with the bed of each slice where a list is given. */
 function followCrack(body: Body, push: Push, beds: Bed[] | null): Pick<SupportLine, 'fallsAt' | 'wedge'> {
-  let pressing = NONE;
+  const pressing = { ...NONE };
   // left out on the open side of a crack, in front and behind
-  let inFront = NONE;
-  let behind = NONE;
+  const inFront = { ...NONE };
+  const behind = { ...NONE };
   let from = -Infinity;
   let to = Infinity;
   let above: Slice | null = null;
@@ -84,49 +95,64 @@ function followCrack(body: Body, push: Push, beds: Bed[] | null): Pick<SupportLi
     const slice = body.slices[i] as Slice;
     const { front, back } = slice;
     const others = body.others[i] as BedForce;
-    const lean = leanOf(slice, others, push, sum(pressing, sum(inFront, behind)));
+    const lean = leanOf(
+      slice,
+      others,
+      push,
+      pressing.weight + inFront.weight + behind.weight,
+      pressing.moment + inFront.moment + behind.moment,
+    );
     // what stands on the pressed side bears again
     if (lean !== 'outwards') {
-      pressing = sum(pressing, inFront);
-      inFront = NONE;
+      move(inFront, pressing);
       from = front;
     }
     if (lean !== 'inwards') {
-      pressing = sum(pressing, behind);
-      behind = NONE;
+      move(behind, pressing);
       to = back;
     }
     // an edge that has not opened follows the face of the course, set-off or not
     from = above === null || from <= above.front ? front : Math.min(Math.max(from, front), back);
     to = above === null || to >= above.back ? back : Math.min(Math.max(to, from), back);
     const start = startOf(slice, others, push, pressing.weight, pressing.moment, from, to);
-    const end = lean === 'whole' ? ([front, back] as const) : opened(start, lean === 'outwards' ? 1 : -1);
+    const end: readonly [number, number] | null =
+      lean === 'whole' ? [front, back] : opened(start, lean === 'outwards' ? 1 : -1);
     if (end === null) {
       beds?.push(bedUnder(start, NONE, push, others));
       return { fallsAt: i, wedge: inFront.weight + behind.weight };
     }
     const own = counted(start, end[0], end[1]);
-    const whole = counted({ ...start, from: front, to: back }, front, back);
-    const parted = { weight: whole.weight - own.weight, moment: whole.moment - own.moment };
-    if (lean === 'outwards') inFront = sum(inFront, parted);
-    if (lean === 'inwards') behind = sum(behind, parted);
-    pressing = sum(pressing, own);
-    beds?.push(bedUnder(startOf(slice, others, push, pressing.weight, pressing.moment, from, to), NONE, push, others));
+    if (lean !== 'whole') {
+      const block = blockWeight(slice);
+      const parted = lean === 'outwards' ? inFront : behind;
+      add(parted, { weight: block - own.weight, moment: (block * (front + back)) / 2 - own.moment });
+    }
+    add(pressing, own);
+    beds?.push(bedUnder(start, own, push, others));
     [from, to] = end;
     above = slice;
   }
   return { fallsAt: null, wedge: inFront.weight + behind.weight };
 }
 
+const blockWeight = ({ front, back, top, bottom, breadth, unitWeight }: Slice): number =>
+  unitWeight * breadth * (back - front) * (bottom - top);
+
 /** Which way the lower bed of a slice opens with all the masonry over it counted. */
-function leanOf(slice: Slice, others: BedForce, push: Push, over: Weight): 'whole' | 'outwards' | 'inwards' {
-  const { front, back } = slice;
-  const start = startOf(slice, others, push, over.weight, over.moment, front, back);
-  const own = counted(start, front, back);
-  const normal = start.normal + own.weight;
-  const moment = start.moment + own.moment;
-  const depth = back - front;
-  const off = moment - ((front + back) / 2) * normal;
+function leanOf(
+  slice: Slice,
+  others: BedForce,
+  push: Push,
+  weight: number,
+  weightMoment: number,
+): 'whole' | 'outwards' | 'inwards' {
+  const middle = (slice.front + slice.back) / 2;
+  const depth = slice.back - slice.front;
+  const own = blockWeight(slice);
+  const normal = push.vertical + others.normal + weight + own;
+  const moment =
+    push.vertical * push.u + push.horizontal * (slice.bottom - push.z) + others.moment + weightMoment + own * middle;
+  const off = moment - middle * normal;
   if (depth > 0 && normal > 0 && Math.abs(off) <= (normal * depth) / 6) return 'whole';
   return off >= 0 ? 'outwards' : 'inwards';
 }
