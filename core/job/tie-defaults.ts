@@ -127,7 +127,7 @@ function resolveMetal(
       value: row.name,
       because: named
         ? `Not every figure of the metal is given; those of ${row.name} are taken (${row.source}).`
-        : `The metal is not one of the table; the figures not given are those of ${row.name} (${row.source}).`,
+        : `${material.name === undefined ? 'No metal is named' : 'The metal is not one of the table'}; the figures not given are those of ${row.name} (${row.source}).`,
     });
   }
   return metal;
