@@ -31,3 +31,9 @@ mount(App, {
   target: document.querySelector('#app')!,
   props: { session, files, view, questions, schemes, host, autosave, dropping },
 });
+
+// After everything the person waits for: the page then works without its server too.
+if (import.meta.env.PROD && host.shell === 'browser' && 'serviceWorker' in navigator)
+  addEventListener('load', () => {
+    navigator.serviceWorker.register('./offline.js', { updateViaCache: 'none' }).catch(() => undefined);
+  });

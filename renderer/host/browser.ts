@@ -4,7 +4,7 @@
  */
 import { fileOpen, fileSave, supported } from 'browser-fs-access';
 import { version } from '../../package.json';
-import type { FileRef, Host, OpenedFile, Outcome } from '../../app/host.ts';
+import type { FileRef, Host, OpenedFile, Outcome, Unlisten } from '../../app/host.ts';
 import { browserDrafts } from './drafts.ts';
 import { changedSince, handleOf, markSeen, reference } from './handles.ts';
 import { watchOthers } from './others.ts';
@@ -63,6 +63,23 @@ async function openDropped(file: File, item: (DataTransferItem & Dropped) | unde
   return opened(file, found instanceof FileSystemFileHandle ? found : null);
 }
 
+interface LaunchQueue {
+  setConsumer(consumer: (launch: { readonly files: readonly FileSystemHandle[] }) => void): void;
+}
+
+/** Where the page is installed, the system hands it the files of its kind. */
+const { launchQueue } = window as Window & { readonly launchQueue?: LaunchQueue };
+
+function onLaunch(queue: LaunchQueue, listener: (opened: Outcome<OpenedFile>) => void): Unlisten {
+  queue.setConsumer(({ files }) => {
+    const handle = files.find((file) => file instanceof FileSystemFileHandle);
+    if (handle === undefined) return;
+    const read = async (): Promise<OpenedFile> => opened(await handle.getFile(), handle);
+    void settled(read, `${handle.name} could not be opened.`).then(listener);
+  });
+  return () => queue.setConsumer(() => undefined);
+}
+
 async function writeNew(fileName: string, bytes: Uint8Array): Promise<FileRef> {
   const handle = await fileSave(blobOf(bytes, JOB_TYPE), { ...NEW_JOB_KIND, fileName });
   const file = reference(handle?.name ?? fileName, handle);
@@ -104,6 +121,9 @@ export const browserHost = {
   drafts: browserDrafts,
   saves: keptSaves,
   dropped: (file, item) => settled(() => openDropped(file, item), `${file.name} could not be opened.`),
+  ...(launchQueue === undefined
+    ? {}
+    : { onOpenFile: (listener: (opened: Outcome<OpenedFile>) => void) => onLaunch(launchQueue, listener) }),
   changedSince,
   watchOthers,
 } satisfies Host;

@@ -25,6 +25,10 @@ export function letteredLength(length: number): string {
   return display.decimal === 'comma' ? text.replace('.', ',') : text;
 }
 
+/** The same with its unit, for a sentence. */
+export const lengthInWords = (length: number): string =>
+  display.units === 'ft-in' ? letteredLength(length) : `${letteredLength(length)}\u00a0${display.units}`;
+
 /** How a sheet letters lengths, and what it says of that; forces stay metric, as the findings are. */
 export function sheetLettering(): Pick<SheetOptions, 'length' | 'lengthUnit' | 'units'> {
   const unit = display.units === 'ft-in' ? '' : display.units;

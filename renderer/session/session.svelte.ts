@@ -5,7 +5,7 @@
 import type { AssessedScheme, SchemeOutcome } from '../../core/assess/assess.ts';
 import type { About } from '../../core/drawing/scene.ts';
 import type { Photographs } from '../../core/job/archive.ts';
-import { patchScheme } from '../../core/job/edits.ts';
+import { addArch, patchScheme } from '../../core/job/edits.ts';
 import type { Arch, Job, Scheme } from '../../core/job/schema.ts';
 import type { FileRef } from '../../app/host.ts';
 import { outcomeOf } from './assessed.ts';
@@ -103,6 +103,13 @@ export class Session {
   editJob(name: string, edit: (job: Job) => Job): void {
     this.#preview = null;
     this.#history = recorded(this.#history, name, edit(this.settled));
+  }
+
+  /** Another arch of the job, shown at once. */
+  addArch(scheme: Scheme): void {
+    this.editJob('arch added', (job) => addArch(job, scheme));
+    const added = this.settled.arches.at(-1);
+    if (added !== undefined) this.show(added.id, '');
   }
 
   undo(): void {

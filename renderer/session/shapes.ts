@@ -1,5 +1,7 @@
-import type { DrawnShape } from '../../core/job/edits.ts';
+import { crownHeightOf, spanOf, type DrawnShape } from '../../core/job/edits.ts';
+import { freshScheme } from '../../core/job/fresh.ts';
 import type { ProfileShape } from '../../core/job/schema.ts';
+import { lengthInWords } from './preferences.ts';
 
 interface ShapeWords {
   readonly name: string;
@@ -37,3 +39,9 @@ export const CHOOSABLE: readonly DrawnShape[] = [
   'horseshoe',
   'flat',
 ];
+
+/** The proportions in which a new arch of this shape begins: `3.00 m wide, 0.75 m high`. */
+export function beginsAs(shape: DrawnShape): string {
+  const { profile } = freshScheme(shape);
+  return `${lengthInWords(spanOf(profile))} wide, ${lengthInWords(crownHeightOf(profile))} high`;
+}
