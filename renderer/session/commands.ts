@@ -40,7 +40,7 @@ export interface Shortcut {
 
 const DIGITS = [1, 2, 3, 4, 5, 6, 7, 8, 9] as const;
 
-export const SHORTCUTS: readonly Shortcut[] = [
+const SHORTCUTS: readonly Shortcut[] = [
   { action: 'new', name: 'New arch', group: 'Document', held: 'mod', key: 'n', shell: 'desktop' },
   { action: 'new', name: 'New arch', group: 'Document', held: 'alt', key: 'KeyN', shell: 'browser' },
   { action: 'open', name: 'Open', group: 'Document', held: 'mod', key: 'o' },
