@@ -93,7 +93,7 @@ function verdict(marks: number, ranking: readonly Explanation[]): Pick<CrackRead
 export const explanationInWords = ({ pattern, alike }: Explanation): string =>
   [pattern, ...alike].map(movementInWords).join(' or ');
 
-export function movementInWords({ kind, x }: CrackPattern): string {
+function movementInWords({ kind, x }: CrackPattern): string {
   switch (kind) {
     case 'spreading':
       return 'the springings having spread apart';

@@ -18,7 +18,7 @@ export interface StressFigureOptions {
 }
 
 /** mm: the joint from 0 to WIDTH at height 0. */
-const WIDTH = 64;
+const WIDTH = 46;
 const STONE = 9;
 const DEPTH = 15;
 const ARROW = 20;
