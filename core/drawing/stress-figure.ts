@@ -10,7 +10,7 @@ import { along, arrowhead, lettering, polygon, rectangle, stroke } from './path.
 import { Places } from './places.ts';
 import { addItems, makeScene, type Items, type LayerName, type Scene, type SceneItem, type TextItem } from './scene.ts';
 import type { Role } from './style.ts';
-import { wrapText } from './text.ts';
+import { textWidth, wrapText } from './text.ts';
 
 export interface StressFigureOptions {
   /** Compressive strength, MPa; null where it is not known. */
@@ -111,7 +111,12 @@ function drawStress(sketch: Sketch, { stress, length }: JointReport, strength: n
   const letterEdge = (value: number, x: number, align: TextItem['align']): void => {
     if (value === 0) return;
     const text = `${figure(value)} kPa${value === greatest ? of : ''}`;
-    letter(sketch, 'stress', text, { x, y: depth(value) - 3.6 }, align, 'text-force');
+    // under the block all along the lettering: its edge falls away towards the greater stress
+    const width = textWidth(text, LETTERS);
+    const inner = Math.min(right, Math.max(left, align === 'start' ? x + width : x - width));
+    const share = right === left ? 0 : (inner - left) / (right - left);
+    const atInner = depth(intradosStress + share * (extradosStress - intradosStress));
+    letter(sketch, 'stress', text, { x, y: Math.min(depth(value), atInner) - 3.6 }, align, 'text-force');
   };
   letterEdge(intradosStress, left, 'start');
   letterEdge(extradosStress, right, 'end');
