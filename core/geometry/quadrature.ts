@@ -21,3 +21,9 @@ export const SIX_POINTS = symmetricRule(
   [0.2386191860831969, 0.6612093864662645, 0.9324695142031521],
   [0.467913934572691, 0.3607615730481386, 0.1713244923791704],
 );
+
+/** For a sixth of a span and less, where four points leave no more than rounding. */
+export const FOUR_POINTS = symmetricRule(
+  [0.3399810435848563, 0.8611363115940526],
+  [0.6521451548625461, 0.3478548451374538],
+);

@@ -2,7 +2,7 @@ import { clampBetween } from './clamp.ts';
 import type { Curve, Edge, OffsettableCurve, ThicknessLaw } from './curve.ts';
 import type { Moments } from './moments.ts';
 import type { Point } from './point.ts';
-import { SIX_POINTS, TEN_POINTS, type GaussRule } from './quadrature.ts';
+import { FOUR_POINTS, SIX_POINTS, TEN_POINTS, type GaussRule } from './quadrature.ts';
 
 /** A point of a curve with its first and second derivatives by the parameter. */
 export interface Jet {
@@ -277,7 +277,8 @@ export class SmoothCurve implements OffsettableCurve {
   }
 
   private ruleFor(stretch: number): GaussRule {
-    return 2 * Math.abs(stretch) <= Math.abs(this.spans.step) ? SIX_POINTS : TEN_POINTS;
+    const share = Math.abs(stretch / this.spans.step);
+    return share <= 1 / 6 ? FOUR_POINTS : share <= 1 / 2 ? SIX_POINTS : TEN_POINTS;
   }
 
   /** Where a function that rises through zero once along the curve is zero, or the end beyond which it is. */
