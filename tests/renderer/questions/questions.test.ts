@@ -3,7 +3,7 @@ import { addCrack, setMasonry, setThickness } from '../../../core/job/edits.ts';
 import { freshJob } from '../../../core/job/fresh.ts';
 import { Questions } from '../../../renderer/questions/questions.svelte.ts';
 import { Session } from '../../../renderer/session/session.svelte.ts';
-import type { Desk } from '../../../renderer/work/desk.ts';
+import type { Desk } from '../../../renderer/worker/desk.ts';
 
 const NO_DESK: Desk = {
   spread: () => Promise.resolve(null),

@@ -1,9 +1,9 @@
 import { expect, it } from 'vitest';
 import { setThickness } from '../../../core/job/edits.ts';
 import { freshJob } from '../../../core/job/fresh.ts';
-import type { Spread, Told } from '../../../renderer/work/answers.ts';
-import type { Desk } from '../../../renderer/work/desk.ts';
-import { LongQuestion } from '../../../renderer/work/long-question.svelte.ts';
+import type { Spread, Told } from '../../../renderer/worker/answers.ts';
+import type { Desk } from '../../../renderer/worker/desk.ts';
+import { LongQuestion } from '../../../renderer/worker/long-question.svelte.ts';
 import { Session } from '../../../renderer/session/session.svelte.ts';
 
 const SPREAD: Spread = { places: [], collapse: 0.1, furthest: 0.5 };
